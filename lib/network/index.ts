@@ -1,0 +1,1 @@
+export type { Analysis, Network, Tangle, Times } from './types';
