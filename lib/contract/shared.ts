@@ -7,7 +7,8 @@ export const isoDate = z.iso.date();
 export const unit = z.enum(['day', 'hour', 'week']);
 export const scheduleState = z.enum(['received', 'corrected', 'proposed']);
 export const weight = z.enum(['blocks', 'distorts', 'query']);
-export const role = z.enum(['administrator', 'analyst', 'reviewer', 'scheduler']);
+export const ROLES = ['administrator', 'analyst', 'reviewer', 'scheduler'] as const;
+export const role = z.enum(ROLES);
 export type Role = z.infer<typeof role>;
 
 /** RFC 9457. */
