@@ -53,6 +53,8 @@ export interface ActivityList {
   readonly singleDuration: boolean;
   /** The unit a duration without one was read in, and whether header, project setting or nothing but habit gave it. */
   readonly unit: { readonly value: Unit; readonly from: 'header' | 'project' | 'assumed' };
+  /** The options it was read with; what a fix writes into a cell in hours or weeks is turned back by them. */
+  readonly reading: ReadingOptions;
 }
 
 /** How durations without a unit are read, and how long a day and a week are. */

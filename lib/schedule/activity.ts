@@ -1,5 +1,6 @@
 import type { CellRef } from './cell';
 import type { Relation } from './relation';
+import type { CellContent } from './sheet';
 
 export const UNITS = ['day', 'hour', 'week'] as const;
 export type Unit = (typeof UNITS)[number];
@@ -13,6 +14,8 @@ export interface Estimate {
   readonly days: number | null;
   /** As written, '' where empty. */
   readonly text: string;
+  /** What the cell holds, as a correction's `from` says it: a number where it keeps one, null where empty. */
+  readonly content: CellContent;
   /** Null where the list has no column for it. */
   readonly cell: CellRef | null;
   readonly problem: EstimateProblem | null;
@@ -28,6 +31,8 @@ export interface Activity {
   /** Trimmed, `7.0` written `7`; '' where missing. */
   readonly id: string;
   readonly idCell: CellRef | null;
+  /** What the ID cell holds, as a correction's `from` says it. */
+  readonly idContent: CellContent;
   /** The code where the ID cell holds an error value. */
   readonly idError: string | null;
   readonly name: string;
@@ -64,6 +69,8 @@ export interface LinkCell {
   readonly gives: 'predecessors' | 'successors';
   readonly cell: CellRef;
   readonly text: string;
+  /** What the cell holds, as a correction's `from` says it: a number where it keeps one. */
+  readonly content: CellContent;
   readonly items: readonly LinkItem[];
   /** What stands between entries in this cell, or in most cells of the column where it has one entry. */
   readonly separator: string;

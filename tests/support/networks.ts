@@ -1,5 +1,5 @@
 import type { Activity, Estimate, Link, LinkCell, LinkItem } from '@/lib/schedule/activity';
-import type { ActivityList, HeadingRow } from '@/lib/schedule/activity-list';
+import { type ActivityList, DEFAULT_READING, type HeadingRow } from '@/lib/schedule/activity-list';
 import type { CellRef } from '@/lib/schedule/cell';
 import { RELATIONS, type Relation } from '@/lib/schedule/relation';
 
@@ -47,6 +47,7 @@ export function list(...rows: readonly string[]): ActivityList {
     indexOf,
     singleDuration,
     unit: { value: 'day', from: 'project' },
+    reading: { ...DEFAULT_READING, unit: 'day' },
   };
 }
 
@@ -94,7 +95,8 @@ function toEstimate(text: string, cell: CellRef): Estimate {
   const written = text === '-' ? '' : text;
   const days = written === '' || Number.isNaN(Number(written)) ? null : Number(written);
   const problem = days !== null ? null : written === '' ? 'empty' : 'unreadable';
-  return { days, text: written, cell, problem, unit: null, readings: [] };
+  const content = days ?? (written === '' ? null : written);
+  return { days, text: written, content, cell, problem, unit: null, readings: [] };
 }
 
 function toActivity(row: Row, index: number, singleDuration: boolean): Activity {
@@ -105,6 +107,7 @@ function toActivity(row: Row, index: number, singleDuration: boolean): Activity 
     index,
     id: row.id,
     idCell: cellOf(row, COLUMNS.id),
+    idContent: row.id === '' ? null : row.id,
     idError: null,
     name: row.name,
     nameCell: cellOf(row, COLUMNS.name),
@@ -146,7 +149,16 @@ function toLinkCells(row: Row, owner: number, indexOf: ReadonlyMap<string, numbe
   const gives = row.arrow === '<-' ? 'predecessors' : 'successors';
   const items = row.links.split(/\s*,\s*/).map((text) => toItem(text, indexOf));
   return [
-    { owner, gives, cell: cellOf(row, COLUMNS[gives]), text: row.links, items, separator: ', ', error: null },
+    {
+      owner,
+      gives,
+      cell: cellOf(row, COLUMNS[gives]),
+      text: row.links,
+      content: row.links,
+      items,
+      separator: ', ',
+      error: null,
+    },
   ];
 }
 
