@@ -29,7 +29,9 @@ export type MeView = z.infer<typeof meView>;
 
 export const contractorView = z.object({ id: uuid, name: z.string(), projects: z.int() });
 export type ContractorView = z.infer<typeof contractorView>;
-export const contractorCreate = z.object({ name: z.string().trim().min(1, 'Give the contractor a name.').max(120) });
+export const contractorCreate = z.object({
+  name: z.string().trim().min(1, 'Give the contractor a name.').max(120),
+});
 
 /** GET /members, POST /members. */
 export const memberView = z.object({
@@ -40,6 +42,8 @@ export const memberView = z.object({
   contractor: z.object({ id: uuid, name: z.string() }).nullable(),
   /** False until the person has set a password. */
   active: z.boolean(),
+  /** True where the membership was taken away; what the person did stays. */
+  disabled: z.boolean(),
 });
 export type MemberView = z.infer<typeof memberView>;
 export const memberCreate = z
@@ -53,6 +57,8 @@ export const memberCreate = z
     path: ['contractor'],
     message: 'A scheduler works for one contractor; the other roles for none.',
   });
+/** PATCH /members/{member}: takes the membership away, or gives it back. */
+export const memberUpdate = z.object({ disabled: z.boolean() });
 /** The answer to POST /members and POST /members/{id}/invitation: the link is shown once. */
 export const invitationView = z.object({ member: memberView, link: z.string(), expires: z.iso.datetime() });
 export type InvitationView = z.infer<typeof invitationView>;

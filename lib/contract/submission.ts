@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { calendar } from './office';
 import { isoDate, scheduleState, uuid, weight } from './shared';
 
 export const submissionStatus = z.enum(['received', 'under review', 'returned', 'accepted', 'superseded']);
@@ -64,6 +65,9 @@ export const submissionView = z.object({
 });
 export type SubmissionView = z.infer<typeof submissionView>;
 
+export const activitiesQuery = z.object({ state: scheduleState.default('corrected') });
+export const workbookQuery = z.object({ state: z.enum(['received', 'corrected']).default('corrected') });
+
 export const linkView = z.object({ id: z.string(), type: z.enum(['FS', 'SS', 'FF', 'SF']), lag: z.number() });
 export const activityView = z.object({
   id: z.string(),
@@ -121,7 +125,13 @@ export const correctionCreate = z
     version: z.int().min(0),
     fixes: z.array(uuid).min(1).max(200_000).optional(),
     edits: z
-      .array(z.object({ sheet: z.string(), cell: z.string().regex(/^[A-Za-z]{1,3}[1-9]\d{0,6}$/), to: cellContent }))
+      .array(
+        z.object({
+          sheet: z.string(),
+          cell: z.string().regex(/^[A-Za-z]{1,3}[1-9]\d{0,6}$/),
+          to: cellContent,
+        }),
+      )
       .min(1)
       .max(1000)
       .optional(),
@@ -185,6 +195,8 @@ export const analysisView = z.discriminatedUnion('computable', [
     computable: z.literal(true),
     state: scheduleState,
     unit: z.literal('working day'),
+    /** Turns working days into dates: time 0 is the beginning of its first working day from `start` on. */
+    calendar,
     start: isoDate,
     finish: isoDate,
     expectedDuration: z.number(),

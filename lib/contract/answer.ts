@@ -1,0 +1,25 @@
+/** A file as an answer. */
+export class Download {
+  constructor(
+    readonly name: string,
+    readonly mediaType: string,
+    readonly bytes: Uint8Array,
+  ) {}
+}
+
+export interface StreamSink {
+  /** Sends one event; `data` is written as JSON. */
+  send(kind: string, data: unknown): void;
+  close(): void;
+}
+
+/** Server-sent events as an answer. `open` is called once and gives back what ends the subscription. */
+export class EventStream {
+  constructor(readonly open: (sink: StreamSink) => Promise<() => void>) {}
+}
+
+/** A file that came with a form. */
+export interface UploadedFile {
+  readonly name: string;
+  readonly bytes: Uint8Array;
+}

@@ -1,0 +1,90 @@
+import { z } from 'zod';
+
+export interface FieldError {
+  /** `edits.0.cell`; '' where the whole is at fault. */
+  readonly path: string;
+  readonly message: string;
+}
+
+interface More {
+  readonly errors?: readonly FieldError[];
+  /** Further members of the problem document. */
+  readonly members?: Readonly<Record<string, unknown>>;
+  readonly headers?: Readonly<Record<string, string>>;
+}
+
+/** What a use-case refuses, with a plain sentence; lib/http/problem.ts writes it as a problem document. */
+export abstract class Refusal extends Error {
+  abstract readonly status: number;
+  abstract readonly title: string;
+  readonly more: More;
+
+  constructor(sentence: string, more: More = {}) {
+    super(sentence);
+    this.name = new.target.name;
+    this.more = more;
+  }
+}
+
+/** The request itself cannot be read: broken JSON, a broken form. */
+export class Malformed extends Refusal {
+  readonly status = 400;
+  readonly title = 'The request cannot be read';
+}
+
+export class Unauthorised extends Refusal {
+  readonly status = 401;
+  readonly title = 'Not signed in';
+}
+
+export class Forbidden extends Refusal {
+  readonly status = 403;
+  readonly title = 'Not allowed';
+}
+
+/** Also for what exists and is not the asker's to know of. */
+export class NotFound extends Refusal {
+  readonly status = 404;
+  readonly title = 'Not found';
+}
+
+/** The request is sound, and the state of things is against it. */
+export class Conflict extends Refusal {
+  readonly status = 409;
+  readonly title = 'Not as things stand';
+}
+
+export class TooLarge extends Refusal {
+  readonly status = 413;
+  readonly title = 'Too large';
+}
+
+export class UnsupportedMedia extends Refusal {
+  readonly status = 415;
+  readonly title = 'Sent in another form than expected';
+}
+
+export class Invalid extends Refusal {
+  readonly status = 422;
+  readonly title = 'Something in it is not right';
+
+  static field(path: string, message: string): Invalid {
+    return new Invalid(message, { errors: [{ path, message }] });
+  }
+}
+
+export class TooMany extends Refusal {
+  readonly status = 429;
+  readonly title = 'Too many attempts';
+}
+
+/** Reads what a caller sent by its shape; throws `Invalid` naming each field at fault. */
+export function checked<T extends z.ZodType>(shape: T, sent: unknown): z.output<T> {
+  const result = shape.safeParse(sent);
+  if (result.success) return result.data;
+  const errors = result.error.issues.map((issue) => ({ path: issue.path.join('.'), message: issue.message }));
+  const [first] = errors;
+  const sentence =
+    errors.length === 1 && first ? first.message : `${errors.length} fields are not as they must be.`;
+  throw new Invalid(sentence, { errors });
+}

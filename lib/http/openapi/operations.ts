@@ -1,0 +1,350 @@
+import { z } from 'zod';
+import { intakeView, matchingForm } from '@/lib/contract/intake';
+import * as office from '@/lib/contract/office';
+import { projectCreate, projectUpdate, projectView } from '@/lib/contract/project';
+import { ruleView } from '@/lib/contract/rule';
+import { items } from '@/lib/contract/shared';
+import * as submission from '@/lib/contract/submission';
+import type { Operation } from './operation';
+
+const OFFICE = '/api/offices/{office}';
+const PROJECT = `${OFFICE}/projects/{project}`;
+const SUBMISSION = `${OFFICE}/submissions/{submission}`;
+
+/** As a form sends it: `columns` is JSON, and everything is text. */
+const uploadForm = z.object({
+  file: z.string().meta({ format: 'binary', description: 'A workbook (XLSX) or a CSV, at most 20 MB.' }),
+  sheet: matchingForm.shape.sheet.describe('Repeat it for a list that goes on over several sheets.'),
+  columns: z.string().optional().describe('JSON: { field: column index }, 0 for column A.'),
+  headerRow: z.string().optional().describe('Row number of the header, from 1; 0 where there is none.'),
+});
+const submissionForm = uploadForm.extend({
+  again: z
+    .string()
+    .optional()
+    .describe('`true` takes in a file although it is byte for byte the latest revision.'),
+});
+
+const stale = {
+  409: 'Someone else was first (`version` is the present one), or the submission is closed to corrections.',
+};
+
+const atLarge: readonly Operation[] = [
+  {
+    id: 'getHealth',
+    method: 'get',
+    path: '/api/health',
+    tag: 'service',
+    summary: 'Whether the service and its database answer.',
+    answer: z.object({ status: z.literal('ok') }),
+    problems: { 503: 'The database does not answer.' },
+    open: true,
+  },
+  {
+    id: 'getDocument',
+    method: 'get',
+    path: '/api/openapi.json',
+    tag: 'service',
+    summary: 'This document.',
+    answer: z.record(z.string(), z.unknown()),
+    open: true,
+  },
+  {
+    id: 'getMe',
+    method: 'get',
+    path: '/api/me',
+    tag: 'people',
+    summary: 'Who is asking, and the offices they belong to.',
+    answer: office.meView,
+  },
+  {
+    id: 'getInvitation',
+    method: 'get',
+    path: '/api/invitations/{token}',
+    tag: 'people',
+    summary: 'Whom an invitation is for.',
+    answer: office.invitationCheck,
+    open: true,
+  },
+  {
+    id: 'acceptInvitation',
+    method: 'post',
+    path: '/api/invitations/{token}',
+    tag: 'people',
+    summary: 'Sets the password; the link works once.',
+    body: office.passwordSet,
+    status: 204,
+    open: true,
+  },
+];
+
+const inOffice: readonly Operation[] = [
+  {
+    id: 'getOffice',
+    method: 'get',
+    path: OFFICE,
+    tag: 'office',
+    summary: 'The office, and what the asker may do in it.',
+    answer: office.officeView,
+  },
+  {
+    id: 'listContractors',
+    method: 'get',
+    path: `${OFFICE}/contractors`,
+    tag: 'office',
+    summary: 'The contractors; for a scheduler its own.',
+    answer: items(office.contractorView),
+  },
+  {
+    id: 'createContractor',
+    method: 'post',
+    path: `${OFFICE}/contractors`,
+    tag: 'office',
+    summary: 'Adds a contractor.',
+    body: office.contractorCreate,
+    status: 201,
+    answer: office.contractorView,
+    problems: { 409: 'There is one of that name.' },
+  },
+  {
+    id: 'listMembers',
+    method: 'get',
+    path: `${OFFICE}/members`,
+    tag: 'people',
+    summary: 'The people of the office and of its contractors.',
+    answer: items(office.memberView),
+  },
+  {
+    id: 'createMember',
+    method: 'post',
+    path: `${OFFICE}/members`,
+    tag: 'people',
+    summary: 'Adds a person; the answer holds the one-time link to set a password.',
+    body: office.memberCreate,
+    status: 201,
+    answer: office.invitationView,
+    problems: { 409: 'The person is a member already.' },
+  },
+  {
+    id: 'updateMember',
+    method: 'patch',
+    path: `${OFFICE}/members/{member}`,
+    tag: 'people',
+    summary: 'Takes a membership away, or gives it back.',
+    body: office.memberUpdate,
+    answer: office.memberView,
+    problems: { 409: 'Nobody would be left to run the office.' },
+  },
+  {
+    id: 'inviteMember',
+    method: 'post',
+    path: `${OFFICE}/members/{member}/invitation`,
+    tag: 'people',
+    summary: 'A new one-time link; the one before stops working.',
+    status: 201,
+    answer: office.invitationView,
+  },
+  {
+    id: 'listRules',
+    method: 'get',
+    path: `${OFFICE}/rules`,
+    tag: 'audit',
+    summary: 'The rules of the audit.',
+    answer: items(ruleView),
+  },
+  {
+    id: 'listProjects',
+    method: 'get',
+    path: `${OFFICE}/projects`,
+    tag: 'projects',
+    summary: 'The projects, each with its latest revision.',
+    answer: items(projectView),
+  },
+  {
+    id: 'createProject',
+    method: 'post',
+    path: `${OFFICE}/projects`,
+    tag: 'projects',
+    summary: 'Adds a project.',
+    body: projectCreate,
+    status: 201,
+    answer: projectView,
+    problems: { 409: 'There is one with that code.' },
+  },
+  {
+    id: 'getProject',
+    method: 'get',
+    path: PROJECT,
+    tag: 'projects',
+    summary: 'One project.',
+    answer: projectView,
+  },
+  {
+    id: 'updateProject',
+    method: 'patch',
+    path: PROJECT,
+    tag: 'projects',
+    summary: 'Changes what is named; a new start, target or calendar moves every figure.',
+    body: projectUpdate,
+    answer: projectView,
+    problems: { 409: 'There is one with that code.' },
+  },
+  {
+    id: 'createIntake',
+    method: 'post',
+    path: `${OFFICE}/intake`,
+    tag: 'submissions',
+    summary: 'Reads a file and says how it would be read; nothing is kept.',
+    form: uploadForm,
+    answer: intakeView,
+  },
+  {
+    id: 'listSubmissions',
+    method: 'get',
+    path: `${PROJECT}/submissions`,
+    tag: 'submissions',
+    summary: 'The revisions of a project, the first one first.',
+    answer: items(submission.submissionView),
+  },
+  {
+    id: 'createSubmission',
+    method: 'post',
+    path: `${PROJECT}/submissions`,
+    tag: 'submissions',
+    summary: 'Takes a file in as the next revision and audits it.',
+    form: submissionForm,
+    status: 201,
+    answer: submission.submissionView,
+    problems: { 409: 'It is byte for byte the latest revision.' },
+  },
+];
+
+const ofSubmission: readonly Operation[] = [
+  {
+    id: 'getSubmission',
+    method: 'get',
+    path: SUBMISSION,
+    tag: 'submissions',
+    summary: 'One revision, with its counts and figures.',
+    answer: submission.submissionView,
+  },
+  {
+    id: 'listActivities',
+    method: 'get',
+    path: `${SUBMISSION}/activities`,
+    tag: 'submissions',
+    summary: 'Its activities, in a state of the schedule.',
+    query: submission.activitiesQuery,
+    answer: items(submission.activityView),
+  },
+  {
+    id: 'listFindings',
+    method: 'get',
+    path: `${SUBMISSION}/findings`,
+    tag: 'audit',
+    summary: 'Its findings, each with its fix.',
+    answer: items(submission.findingView),
+  },
+  {
+    id: 'listCorrections',
+    method: 'get',
+    path: `${SUBMISSION}/corrections`,
+    tag: 'corrections',
+    summary: 'What was adopted and holds, in order.',
+    answer: items(submission.correctionView),
+  },
+  {
+    id: 'createCorrections',
+    method: 'post',
+    path: `${SUBMISSION}/corrections`,
+    tag: 'corrections',
+    summary: 'Adopts fixes, or edits cells by hand.',
+    body: submission.correctionCreate,
+    status: 201,
+    answer: submission.correctionResult,
+    problems: stale,
+  },
+  {
+    id: 'undoCorrection',
+    method: 'delete',
+    path: `${SUBMISSION}/corrections/{correction}`,
+    tag: 'corrections',
+    summary: 'Undoes one correction, or all of a batch.',
+    answer: submission.correctionResult,
+    problems: stale,
+  },
+  {
+    id: 'updateFix',
+    method: 'patch',
+    path: `${SUBMISSION}/fixes/{fix}`,
+    tag: 'corrections',
+    summary: 'Declines a fix, or proposes it again.',
+    body: submission.fixUpdate,
+    answer: submission.findingView,
+    problems: stale,
+  },
+  {
+    id: 'getAnalysis',
+    method: 'get',
+    path: `${SUBMISSION}/analysis`,
+    tag: 'figures',
+    summary: 'The recomputed network.',
+    query: submission.analysisQuery,
+    answer: submission.analysisView,
+  },
+  {
+    id: 'getChance',
+    method: 'get',
+    path: `${SUBMISSION}/chance`,
+    tag: 'figures',
+    summary: 'The chance of a finish, or the finish for a chance: exactly one of days, date, confidence.',
+    query: submission.chanceQuery,
+    answer: submission.chanceView,
+    problems: { 409: 'It cannot be computed; `because` holds the ids of the findings in the way.' },
+  },
+  {
+    id: 'getWorkbook',
+    method: 'get',
+    path: `${SUBMISSION}/workbook`,
+    tag: 'submissions',
+    summary: 'The file as received, or with the corrected cells changed.',
+    query: submission.workbookQuery,
+    answer: { mediaType: 'application/octet-stream', about: 'The file, in its own format.' },
+  },
+  {
+    id: 'listComments',
+    method: 'get',
+    path: `${SUBMISSION}/comments`,
+    tag: 'comments',
+    summary: 'Its comments; for a scheduler the shared ones.',
+    answer: items(submission.commentView),
+  },
+  {
+    id: 'createComment',
+    method: 'post',
+    path: `${SUBMISSION}/comments`,
+    tag: 'comments',
+    summary: 'Comments on a finding, a row or the whole.',
+    body: submission.commentCreate,
+    status: 201,
+    answer: submission.commentView,
+  },
+  {
+    id: 'getRecord',
+    method: 'get',
+    path: `${SUBMISSION}/record`,
+    tag: 'record',
+    summary: 'Who did what when; each entry carries the hash of the one before.',
+    answer: items(submission.recordEntryView),
+  },
+  {
+    id: 'streamEvents',
+    method: 'get',
+    path: `${SUBMISSION}/events`,
+    tag: 'comments',
+    summary: 'What changes, as it does.',
+    answer: { mediaType: 'text/event-stream', about: 'Events named comment, correction, fix, status.' },
+  },
+];
+
+export const OPERATIONS: readonly Operation[] = [...atLarge, ...inOffice, ...ofSubmission];

@@ -1,0 +1,31 @@
+import { Refusal } from '@/lib/contract/errors';
+import { log } from './log';
+
+/** The one place where errors become answers (RFC 9457). What nobody foresaw is logged, and only its id is told. */
+export function problemResponse(error: unknown, request: Request): Response {
+  if (error instanceof Refusal) {
+    const { errors, members, headers } = error.more;
+    return problem(
+      error.status,
+      { title: error.title, detail: error.message, ...(errors && { errors }), ...members },
+      headers,
+    );
+  }
+  const id = crypto.randomUUID();
+  log.error(
+    { id, err: error, method: request.method, url: new URL(request.url).pathname },
+    'unexpected error',
+  );
+  return problem(500, {
+    title: 'Something went wrong here',
+    detail: `Nothing was changed. Quote ${id} when you report it.`,
+    instance: `urn:uuid:${id}`,
+  });
+}
+
+function problem(status: number, members: object, headers: Readonly<Record<string, string>> = {}): Response {
+  return new Response(JSON.stringify({ type: 'about:blank', status, ...members }), {
+    status,
+    headers: { 'content-type': 'application/problem+json', 'cache-control': 'no-store', ...headers },
+  });
+}
