@@ -18,6 +18,8 @@ export interface CellEdit {
   readonly from: CellContent;
   readonly to: CellContent;
   readonly items?: readonly ItemChange[];
+  /** What stands before an added entry, blanks included; absent: as in the cell, else a comma and a blank. */
+  readonly separator?: string;
 }
 
 /** What an edit means for the network; lets the finish effect be computed without reading the list again. */
