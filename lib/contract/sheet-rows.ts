@@ -14,21 +14,30 @@ export const sheetColumnView = z.object({
   /** 0 = column A. */
   index: z.int(),
   letters: z.string(),
+  field: z.string(),
   /** The plain name of what it holds, such as "Optimistic (a)". */
   title: z.string(),
-  field: z.string(),
+});
+export type SheetColumnView = z.infer<typeof sheetColumnView>;
+
+/** The three estimates of the activity that a row begins, in working days; null where a cell gives none. */
+export const rowEstimates = z.object({
+  optimistic: z.number().nullable(),
+  likely: z.number().nullable(),
+  pessimistic: z.number().nullable(),
+});
+export type RowEstimates = z.infer<typeof rowEstimates>;
+
+const rowState = z.object({
+  /** As the sheet has them, by position in `columns`; '' where empty. */
+  cells: z.array(z.string()),
+  /** Null where no activity begins in this row. */
+  estimates: rowEstimates.nullable(),
 });
 
 export const sheetRowsView = z.object({
   sheet: z.string(),
   columns: z.array(sheetColumnView),
-  rows: z.array(
-    z.object({
-      row: z.int(),
-      /** As the sheet has them, by position in `columns`; '' where empty. */
-      received: z.array(z.string()),
-      corrected: z.array(z.string()),
-    }),
-  ),
+  rows: z.array(z.object({ row: z.int(), received: rowState, corrected: rowState })),
 });
 export type SheetRowsView = z.infer<typeof sheetRowsView>;
