@@ -2,7 +2,7 @@ import type { CellEdit } from '@/lib/schedule/edit';
 import type { CellContent, Sheet } from '@/lib/schedule/sheet';
 import { contentOf, settle, textOf } from './content';
 import { type Place, type SheetDraft, WorkbookDraft } from './draft';
-import { applyItems } from './items';
+import { applyItems } from '@/lib/schedule/link-items';
 
 /** What was adopted in one step: a fix's edits, or edits by hand. */
 export interface CorrectionEvent {

@@ -1,4 +1,4 @@
-import type { ItemChange } from '@/lib/schedule/edit';
+import type { ItemChange } from './edit';
 
 /** Where an entry of a predecessor or successor cell stands in its text, blanks around it left out. */
 interface Span {

@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { applyItems, itemsOf } from '@/lib/corrections/items';
+import { applyItems, itemsOf } from '@/lib/schedule/link-items';
 
 describe('itemsOf', () => {
   it.each([
