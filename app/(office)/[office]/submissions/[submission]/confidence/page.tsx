@@ -1,0 +1,13 @@
+import type { Metadata } from 'next';
+import { ConfidencePlace } from '@/components/confidence/confidence-place';
+
+export const metadata: Metadata = { title: 'Confidence' };
+
+export default async function ConfidencePage({
+  params,
+}: {
+  params: Promise<{ office: string; submission: string }>;
+}) {
+  const { office, submission } = await params;
+  return <ConfidencePlace office={office} submission={submission} />;
+}

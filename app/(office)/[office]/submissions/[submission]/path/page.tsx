@@ -1,0 +1,13 @@
+import type { Metadata } from 'next';
+import { PathPlace } from '@/components/path/path-place';
+
+export const metadata: Metadata = { title: 'Path' };
+
+export default async function PathPage({
+  params,
+}: {
+  params: Promise<{ office: string; submission: string }>;
+}) {
+  const { office, submission } = await params;
+  return <PathPlace office={office} submission={submission} />;
+}
