@@ -40,3 +40,13 @@ export function useInviteMember(office: string) {
     onSuccess: () => client.invalidateQueries({ queryKey: keys.members(office) }),
   });
 }
+
+/** Takes a membership away, or gives it back; what the person did stays. */
+export function useUpdateMember(office: string) {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: ({ member, disabled }: { member: string; disabled: boolean }) =>
+      call<MemberView>(officePath(office, 'members', member), { method: 'PATCH', body: { disabled } }),
+    onSuccess: () => client.invalidateQueries({ queryKey: keys.members(office) }),
+  });
+}

@@ -3,7 +3,7 @@ import { z } from 'zod';
 /** Shapes that several entities use. */
 export const uuid = z.uuid();
 /** A calendar date, YYYY-MM-DD. */
-export const isoDate = z.iso.date();
+export const isoDate = z.iso.date('Write a date as 2027-03-12.');
 export const unit = z.enum(['day', 'hour', 'week']);
 export const scheduleState = z.enum(['received', 'corrected', 'proposed']);
 export const weight = z.enum(['blocks', 'distorts', 'query']);
