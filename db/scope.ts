@@ -17,14 +17,19 @@ export interface OfficeScope {
  */
 export function withOffice<T>(scope: OfficeScope, work: (tx: Tx) => Promise<T>): Promise<T> {
   return database().transaction(async (tx) => {
-    await tx.execute(
-      sql`select set_config('app.office', ${scope.office}, true),
-                 set_config('app.user', ${scope.user}, true),
-                 set_config('app.contractor', ${scope.contractor ?? NO_CONTRACTOR}, true),
-                 set_config('role', 'plumbrow_app', true)`,
-    );
+    await enterOffice(tx, scope);
     return work(tx);
   });
+}
+
+/** Goes on as the application's role in a transaction that began as another, once it is known for whom. */
+export async function enterOffice(tx: Tx, scope: OfficeScope): Promise<void> {
+  await tx.execute(
+    sql`select set_config('app.office', ${scope.office}, true),
+               set_config('app.user', ${scope.user}, true),
+               set_config('app.contractor', ${scope.contractor ?? NO_CONTRACTOR}, true),
+               set_config('role', 'plumbrow_app', true)`,
+  );
 }
 
 /** One transaction for what happens before an office is known: sign-in, tokens, invitations, a person's offices. */

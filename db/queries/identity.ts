@@ -89,7 +89,7 @@ const usable = (tokenHash: string) =>
 
 export async function findInvitation(tx: Tx, tokenHash: string) {
   const [row] = await tx
-    .select({ user: users.id, name: users.name, email: users.email, office: offices.name })
+    .select({ user: users.id, name: users.name, email: users.email, office })
     .from(invitations)
     .innerJoin(users, eq(users.id, invitations.userId))
     .innerJoin(offices, eq(offices.id, invitations.officeId))

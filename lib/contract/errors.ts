@@ -78,6 +78,11 @@ export class TooMany extends Refusal {
   readonly title = 'Too many attempts';
 }
 
+export class Unavailable extends Refusal {
+  readonly status = 503;
+  readonly title = 'Not available';
+}
+
 /** Reads what a caller sent by its shape; throws `Invalid` naming each field at fault. */
 export function checked<T extends z.ZodType>(shape: T, sent: unknown): z.output<T> {
   const result = shape.safeParse(sent);

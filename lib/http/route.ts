@@ -15,7 +15,8 @@ export interface Call {
   /** JSON as sent; null where nothing was. */
   readonly body: unknown;
   readonly form: Form;
-  readonly headers: Headers;
+  /** Where the asker finds this service: scheme, host and port. */
+  readonly origin: string;
 }
 
 interface Options {
@@ -74,8 +75,15 @@ async function read(request: Request, path: Call['path'], { takes = 'json' }: Op
     query,
     body: sends && takes === 'json' ? await readJson(request) : null,
     form: sends && takes === 'form' ? await readForm(request) : NO_FORM,
-    headers: request.headers,
+    origin: originOf(request),
   };
+}
+
+function originOf({ headers, url }: Request): string {
+  const configured = process.env.NEXTAUTH_URL;
+  if (configured && URL.canParse(configured)) return new URL(configured).origin;
+  const scheme = headers.get('x-forwarded-proto') ?? new URL(url).protocol.replace(':', '');
+  return `${scheme}://${headers.get('x-forwarded-host') ?? headers.get('host') ?? new URL(url).host}`;
 }
 
 function respond(answer: unknown, { status = 200 }: Options, request: Request): Response {

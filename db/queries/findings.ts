@@ -1,0 +1,127 @@
+import { and, asc, eq, inArray, ne, sql } from 'drizzle-orm';
+import type { MessageData } from '@/lib/audit/rule';
+import type { FindingState, Weight } from '@/lib/schedule/weight';
+import type { Tx } from '../client';
+import { findings, type FindingOrigin } from '../schema';
+import { inBatches } from './bulk';
+
+export interface NewFinding {
+  readonly id: string;
+  readonly key: string;
+  readonly rule: string;
+  readonly weight: Weight;
+  readonly message_id: string;
+  readonly data: MessageData;
+  readonly activity_id: string | null;
+  readonly activity_name: string | null;
+  readonly sheet: string | null;
+  readonly row: number | null;
+  readonly cell: string | null;
+  readonly origin: FindingOrigin;
+  readonly position: number;
+}
+
+export type FindingRow = Awaited<ReturnType<typeof listFindings>>[number];
+
+const columns = {
+  id: findings.id,
+  key: findings.key,
+  rule: findings.rule,
+  weight: findings.weight,
+  messageId: findings.messageId,
+  data: findings.data,
+  activityId: findings.activityId,
+  activityName: findings.activityName,
+  sheet: findings.sheet,
+  row: findings.row,
+  cell: findings.cell,
+  state: findings.state,
+  origin: findings.origin,
+  position: findings.position,
+};
+
+export async function insertFindings(
+  tx: Tx,
+  officeId: string,
+  submissionId: string,
+  rows: readonly NewFinding[],
+): Promise<void> {
+  await inBatches(
+    tx,
+    rows,
+    (json) => sql`
+      insert into findings (id, office_id, submission_id, key, rule, weight, message_id, data,
+                            activity_id, activity_name, sheet, row, cell, origin, position)
+      select r.id, ${officeId}, ${submissionId}, r.key, r.rule, r.weight, r.message_id, r.data,
+             r.activity_id, r.activity_name, r.sheet, r.row, r.cell, r.origin, r.position
+      from json_to_recordset(${json})
+        as r(id uuid, key text, rule text, weight text, message_id text, data jsonb, activity_id text,
+             activity_name text, sheet text, row int, cell text, origin text, position int)`,
+  );
+}
+
+export async function listFindings(tx: Tx, submissionId: string) {
+  return tx
+    .select(columns)
+    .from(findings)
+    .where(eq(findings.submissionId, submissionId))
+    .orderBy(asc(findings.position), asc(findings.id));
+}
+
+export async function findFinding(tx: Tx, submissionId: string, id: string) {
+  const [row] = await tx
+    .select(columns)
+    .from(findings)
+    .where(and(eq(findings.submissionId, submissionId), eq(findings.id, id)));
+  return row ?? null;
+}
+
+/** Ids of the findings that keep a state of the schedule from being computed. */
+export async function listBlocking(
+  tx: Tx,
+  submissionId: string,
+  state: 'received' | 'corrected',
+): Promise<string[]> {
+  const ofState = state === 'received' ? eq(findings.origin, 'received') : ne(findings.state, 'corrected');
+  const rows = await tx
+    .select({ id: findings.id })
+    .from(findings)
+    .where(and(eq(findings.submissionId, submissionId), eq(findings.weight, 'blocks'), ofState))
+    .orderBy(asc(findings.position), asc(findings.id));
+  return rows.map((row) => row.id);
+}
+
+export interface FindingChange {
+  readonly id: string;
+  readonly state: FindingState;
+  readonly weight: Weight;
+  readonly message_id: string;
+  readonly data: MessageData;
+  readonly row: number | null;
+  readonly cell: string | null;
+}
+
+/** A finding seen again may say something else: its state, sentence and place are written anew. */
+export async function updateFindings(
+  tx: Tx,
+  submissionId: string,
+  rows: readonly FindingChange[],
+): Promise<void> {
+  await inBatches(
+    tx,
+    rows,
+    (json) => sql`
+      update findings f
+      set state = r.state, weight = r.weight, message_id = r.message_id, data = r.data, row = r.row, cell = r.cell
+      from json_to_recordset(${json})
+        as r(id uuid, state text, weight text, message_id text, data jsonb, row int, cell text)
+      where f.id = r.id and f.submission_id = ${submissionId}`,
+  );
+}
+
+export async function deleteFindings(tx: Tx, submissionId: string, ids: readonly string[]): Promise<void> {
+  if (ids.length === 0) return;
+  await tx
+    .delete(findings)
+    .where(and(eq(findings.submissionId, submissionId), inArray(findings.id, [...ids])));
+}

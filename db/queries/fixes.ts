@@ -1,0 +1,77 @@
+import { and, asc, eq, inArray, sql } from 'drizzle-orm';
+import type { CellEdit } from '@/lib/schedule/edit';
+import type { FixState } from '@/lib/schedule/weight';
+import type { Tx } from '../client';
+import { fixes } from '../schema';
+import { inBatches } from './bulk';
+
+/** As a statement takes it: all that can change of a fix, and what it hangs from. */
+export interface FixValues {
+  readonly id: string;
+  readonly finding_id: string;
+  readonly rank: number;
+  readonly reason: string;
+  readonly edits: readonly CellEdit[];
+  readonly effect_expected: number | null;
+  readonly effect_variance: number | null;
+  readonly state: FixState;
+}
+
+export type FixRow = Awaited<ReturnType<typeof listFixes>>[number];
+
+const record = sql.raw(
+  'r(id uuid, finding_id uuid, rank int, reason text, edits jsonb, effect_expected float8, effect_variance float8, state text)',
+);
+
+export async function insertFixes(
+  tx: Tx,
+  officeId: string,
+  submissionId: string,
+  rows: readonly FixValues[],
+): Promise<void> {
+  await inBatches(
+    tx,
+    rows,
+    (json) => sql`
+      insert into fixes (id, office_id, submission_id, finding_id, rank, reason, edits, effect_expected, effect_variance, state)
+      select r.id, ${officeId}, ${submissionId}, r.finding_id, r.rank, r.reason, r.edits, r.effect_expected,
+             r.effect_variance, r.state
+      from json_to_recordset(${json}) as ${record}`,
+  );
+}
+
+export async function updateFixes(tx: Tx, submissionId: string, rows: readonly FixValues[]): Promise<void> {
+  await inBatches(
+    tx,
+    rows,
+    (json) => sql`
+      update fixes f
+      set reason = r.reason, edits = r.edits, effect_expected = r.effect_expected,
+          effect_variance = r.effect_variance, state = r.state
+      from json_to_recordset(${json}) as ${record}
+      where f.id = r.id and f.submission_id = ${submissionId}`,
+  );
+}
+
+/** By finding and rank. */
+export async function listFixes(tx: Tx, submissionId: string) {
+  return tx
+    .select({
+      id: fixes.id,
+      finding: fixes.findingId,
+      rank: fixes.rank,
+      reason: fixes.reason,
+      edits: fixes.edits,
+      effectExpected: fixes.effectExpected,
+      effectVariance: fixes.effectVariance,
+      state: fixes.state,
+    })
+    .from(fixes)
+    .where(eq(fixes.submissionId, submissionId))
+    .orderBy(asc(fixes.findingId), asc(fixes.rank));
+}
+
+export async function deleteFixes(tx: Tx, submissionId: string, ids: readonly string[]): Promise<void> {
+  if (ids.length === 0) return;
+  await tx.delete(fixes).where(and(eq(fixes.submissionId, submissionId), inArray(fixes.id, [...ids])));
+}
