@@ -4,15 +4,13 @@ import { fileURLToPath } from 'node:url';
 import { drizzle } from 'drizzle-orm/node-postgres';
 import { migrate as applyMigrations } from 'drizzle-orm/node-postgres/migrator';
 import { Client, DatabaseError } from 'pg';
+import { Refusal } from './cluster/refusal';
 
 const FOLDER = fileURLToPath(new URL('../drizzle', import.meta.url));
 const OLDEST_VERSION = 150_000;
 /** Of no meaning but that every migration takes the same one. */
 const LOCK = 7_586_279_012;
 const ROLES = ['plumbrow_app', 'plumbrow_identity'] as const;
-
-/** A reason, in a sentence for whoever runs the program, why the database cannot be used. */
-export class MigrationRefused extends Error {}
 
 /** Makes the roles where they are missing and brings the database to this program's state. Safe to run twice at once. */
 export async function migrate(url: string): Promise<{ applied: number }> {
@@ -37,7 +35,7 @@ async function serverVersion(client: Client): Promise<number> {
   );
   const version = rows[0];
   if (!version || version.number < OLDEST_VERSION) {
-    throw new MigrationRefused(
+    throw new Refusal(
       `The database server is PostgreSQL ${version?.name ?? 'of an unknown version'}; Plumbrow needs 15 or later.`,
     );
   }
@@ -60,7 +58,7 @@ async function ensureRole(client: Client, role: string, version: number): Promis
     if (!rows[0]?.may) await client.query(`grant ${role} to current_user`);
   } catch (error) {
     if (!(error instanceof DatabaseError) || error.code !== '42501') throw error;
-    throw new MigrationRefused(
+    throw new Refusal(
       `The database's user may not make or take on the role ${role}. Have its administrator run: ` +
         `create role plumbrow_app nologin; create role plumbrow_identity nologin; ` +
         `grant plumbrow_app, plumbrow_identity to ${client.user ?? 'that user'};`,
@@ -86,7 +84,7 @@ async function refuseNewer(applied: readonly number[]): Promise<void> {
   const known = new Set(journal.entries.map((entry) => entry.when));
   const unknown = applied.filter((when) => !known.has(when)).length;
   if (unknown === 0) return;
-  throw new MigrationRefused(
+  throw new Refusal(
     `The database has ${unknown === 1 ? 'a migration' : `${unknown} migrations`} that this version of Plumbrow does not know: ` +
       'it was used by a newer one. Use that version, or another database.',
   );

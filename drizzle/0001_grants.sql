@@ -4,7 +4,7 @@ GRANT USAGE ON SCHEMA "public" TO "plumbrow_app", "plumbrow_identity";--> statem
 
 -- plumbrow_app: the work of an office. No password and no token can be read by it.
 GRANT SELECT ON "offices" TO "plumbrow_app";--> statement-breakpoint
-GRANT SELECT ("id", "email", "name", "session_epoch", "created_at"), INSERT ("id", "email", "name") ON "users" TO "plumbrow_app";--> statement-breakpoint
+GRANT SELECT ("id", "email", "name", "session_epoch", "created_at"), INSERT ON "users" TO "plumbrow_app";--> statement-breakpoint
 GRANT SELECT, INSERT, UPDATE ("role", "contractor_id", "disabled_at") ON "memberships" TO "plumbrow_app";--> statement-breakpoint
 GRANT SELECT ("id", "office_id", "user_id", "expires_at", "used_at", "created_by", "created_at"), INSERT, UPDATE ("expires_at") ON "invitations" TO "plumbrow_app";--> statement-breakpoint
 GRANT SELECT ("id", "office_id", "membership_id", "name", "read_only", "created_at", "last_used_at", "revoked_at", "expires_at"), INSERT, UPDATE ("name", "revoked_at") ON "api_tokens" TO "plumbrow_app";--> statement-breakpoint
