@@ -30,8 +30,8 @@ export function InvitationDialog({ invitation, onClose }: Props) {
         ) : (
           <>
             Send it to {member.email}. It lets {member.name} set a password, works once, and holds until{' '}
-            <DateText value={expires} time />. It is shown only now: once this is closed, it can only be replaced
-            by a new one.
+            <DateText value={expires} time />. It is shown only now: once this is closed, it can only be
+            replaced by a new one.
           </>
         )
       }

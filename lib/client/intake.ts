@@ -11,6 +11,8 @@ export interface MatchingChoice {
   readonly sheets?: readonly string[];
   readonly columns?: Readonly<Partial<Record<Field, number>>>;
   readonly headerRow?: number;
+  /** Takes in a file although it is the latest revision, byte for byte. */
+  readonly again?: boolean | undefined;
 }
 
 /** The form that POST /intake and POST …/submissions take. */
@@ -19,6 +21,7 @@ export function uploadForm(file: File, choice: MatchingChoice = {}): FormData {
   for (const sheet of choice.sheets ?? []) form.append('sheet', sheet);
   if (choice.columns) form.append('columns', JSON.stringify(choice.columns));
   if (choice.headerRow !== undefined) form.append('headerRow', String(choice.headerRow));
+  if (choice.again) form.append('again', 'true');
   form.append('file', file, file.name);
   return form;
 }
