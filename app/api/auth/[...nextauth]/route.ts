@@ -1,7 +1,13 @@
 import NextAuth from 'next-auth';
+import type { NextRequest } from 'next/server';
 import { authOptions } from '@/lib/access/sign-in';
 
-const handler = (request: Request, context: object): Promise<Response> =>
-  NextAuth(request, context, authOptions());
+interface Next {
+  readonly params: Promise<{ nextauth: string[] }>;
+}
+
+function handler(request: NextRequest, next: Next): Promise<Response> {
+  return NextAuth(request, next, authOptions()) as Promise<Response>;
+}
 
 export { handler as GET, handler as POST };
