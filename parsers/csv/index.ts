@@ -1,0 +1,62 @@
+import type { Sheet, SheetRow } from '@/lib/schedule/sheet';
+import { damaged, UnreadableFile } from '@/parsers/errors';
+import { LIMITS } from '@/parsers/limits';
+import { readDialect } from './dialect';
+import { FieldCursor } from './fields';
+
+export { type Dialect, type DialectText, readDialect } from './dialect';
+export { FieldCursor } from './fields';
+
+/** What a text file's only sheet is called. */
+export const CSV_SHEET = 'CSV';
+
+/**
+ * Reads delimiter-separated text: every cell as text, rows numbered by record as a spreadsheet would show
+ * them. Throws UnreadableFile.
+ */
+export function readCsv(bytes: Uint8Array): Sheet {
+  const { text, dialect } = readDialect(bytes);
+  const cursor = new FieldCursor(text, dialect.delimiter, dialect.preamble.length);
+  const rows: SheetRow[] = [];
+  let cells: (string | null)[] = [];
+  let filled = 0;
+  let columnCount = 0;
+  let used = 0;
+  while (cursor.next()) {
+    if (cells.length >= LIMITS.columns)
+      throw damaged('A record of this file has more fields than a sheet has columns.');
+    const value = cellText(cursor.value);
+    cells.push(value === '' ? null : value);
+    if (value !== '') filled = cells.length;
+    if (!cursor.last) continue;
+    if (filled > 0) {
+      cells.length = filled;
+      used += filled;
+      columnCount = Math.max(columnCount, filled);
+      rows.push({ number: cursor.record, hidden: false, outline: 0, cells });
+      if (rows.length > LIMITS.rows + LIMITS.rowsAround) throw new UnreadableFile('too-many-rows');
+      if (used > LIMITS.cells) throw new UnreadableFile('too-many-cells');
+    }
+    cells = [];
+    filled = 0;
+  }
+  if (rows.length === 0) throw new UnreadableFile('empty');
+  return {
+    name: CSV_SHEET,
+    hidden: false,
+    rows,
+    columnCount,
+    hiddenColumns: new Set(),
+    formulas: new Map(),
+    formatCodes: ['General'],
+    merges: [],
+    date1904: false,
+  };
+}
+
+/** `="007"` is how a text is kept a text when a spreadsheet opens the file. */
+function cellText(value: string): string {
+  const text = value.includes('\r') ? value.replace(/\r\n?/g, '\n') : value;
+  if (!text.startsWith('="')) return text;
+  return /^="([^"]*)"$/.exec(text)?.[1] ?? text;
+}

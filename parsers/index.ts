@@ -1,0 +1,2 @@
+export { UnreadableFile, type UnreadableCode } from './errors';
+export { readSheets } from './read-sheets';
