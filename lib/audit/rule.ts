@@ -4,7 +4,9 @@ import type { Fix } from '@/lib/schedule/edit';
 import type { Weight } from '@/lib/schedule/weight';
 
 /** Values put into a message; stored with the finding, so plain JSON. */
-export type MessageData = Readonly<Record<string, string | number | boolean | null | readonly string[] | readonly number[]>>;
+export type MessageData = Readonly<
+  Record<string, string | number | boolean | null | readonly string[] | readonly number[]>
+>;
 
 /** A limit of a rule with its default; a rule book may set another. */
 export interface Limit {
@@ -61,6 +63,17 @@ export interface Rule {
   readonly limits: Readonly<Record<string, Limit>>;
   check(context: AuditContext, limits: Readonly<Record<string, number>>): Defect[];
 }
+
+/** What a rule book says of one rule; what it leaves out stays as the rule has it. */
+export interface RuleSetting {
+  readonly off?: boolean;
+  /** A defect that keeps the network from being computed weighs `blocks` whatever the book says. */
+  readonly weight?: Weight;
+  readonly limits?: Readonly<Record<string, number>>;
+}
+
+/** The rules and limits that a project is held to, by rule id. */
+export type RuleBook = Readonly<Record<string, RuleSetting>>;
 
 /** A defect with its rule, as it is stored. */
 export interface Finding extends Defect {

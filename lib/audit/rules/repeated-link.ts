@@ -1,0 +1,81 @@
+import type { Link } from '@/lib/schedule/activity';
+import type { ActivityList } from '@/lib/schedule/activity-list';
+import { RELATION_NAMES } from '@/lib/schedule/relation';
+import type { Rule } from '../rule';
+import { at } from '../support/about';
+import { removeLinks, writtenIn } from '../support/link-edits';
+import { GAO_LOGIC } from '../support/sources';
+import { amount, called, capital } from '../support/words';
+
+/** Links of one pair and relation, written in one way (a list may say each link from both its ends). */
+function alike(list: ActivityList): number[][] {
+  const groups = new Map<string, number[]>();
+  list.links.forEach((link, index) => {
+    const { fromIndex, toIndex, type, linkCell } = link;
+    if (fromIndex < 0 || toIndex < 0 || fromIndex === toIndex) return;
+    const key = `${fromIndex} ${toIndex} ${type} ${list.linkCells[linkCell]?.gives}`;
+    const group = groups.get(key);
+    if (group) group.push(index);
+    else groups.set(key, [index]);
+  });
+  return [...groups.values()].filter(({ length }) => length > 1);
+}
+
+/** The one that binds: with the largest lag, the first of several. */
+function binding(links: readonly Link[], group: readonly number[]): number {
+  return group.reduce((best, index) => ((links[index]?.lag ?? 0) > (links[best]?.lag ?? 0) ? index : best));
+}
+
+export const rule: Rule = {
+  id: 'repeated-link',
+  meta: {
+    weight: 'query',
+    title: 'The same link stands twice',
+    about:
+      'Two links join the same pair of activities with the same relation. Only the one with the larger lag binds; the other says nothing, or says something else than was meant.',
+    source: GAO_LOGIC,
+    messages: {
+      same: (data) =>
+        `${capital(data.to)} waits for ${data.from} twice, ${data.relation}, ${data.kept} each time.`,
+      lags: (data) =>
+        `${capital(data.to)} waits for ${data.from} twice, ${data.relation}: once ${data.kept} and once ${data.removed}.`,
+    },
+  },
+  limits: {},
+  check({ list }) {
+    return alike(list).flatMap((group) => {
+      const kept = list.links[binding(list.links, group)];
+      return group.flatMap((index) => {
+        const link = list.links[index];
+        const { cell } = writtenIn(list, link);
+        const [from, to] = [list.activities[link?.fromIndex ?? -1], list.activities[link?.toIndex ?? -1]];
+        const owner = cell && list.activities[cell.owner];
+        if (!link || !kept || link === kept || !from || !to || !owner) return [];
+        const same = link.lag === kept.lag;
+        const reason = same
+          ? 'The two say the same, so the later one is removed.'
+          : `The link ${lagWords(kept.lag)} binds, so the other is removed.`;
+        return [
+          {
+            about: `${from.id}|${to.id}|${link.type}`,
+            message: same ? 'same' : 'lags',
+            data: {
+              from: called(from),
+              to: called(to),
+              relation: RELATION_NAMES[link.type],
+              kept: lagWords(kept.lag),
+              removed: lagWords(link.lag),
+            },
+            ...at(owner, cell.cell),
+            fix: removeLinks(list, [index], reason),
+          },
+        ];
+      });
+    });
+  },
+};
+
+function lagWords(lag: number): string {
+  if (lag === 0) return 'without a lag';
+  return lag > 0 ? `with a lag of ${amount(lag)}` : `with a lead of ${amount(-lag)}`;
+}

@@ -1,0 +1,54 @@
+import type { Activity } from '@/lib/schedule/activity';
+import type { ActivityList } from '@/lib/schedule/activity-list';
+import { cellAddress } from '@/lib/schedule/cell';
+import type { Fix, NetworkChange } from '@/lib/schedule/edit';
+import type { CellContent } from '@/lib/schedule/sheet';
+import { type FreeId, freeIds } from './free-ids';
+import { called, joined } from './words';
+
+/** Links that name the ID come to lead from or to the row. */
+function linksGained(list: ActivityList, activity: Activity, { awaitedBy }: FreeId): NetworkChange[] {
+  return awaitedBy.flatMap((index): NetworkChange[] => {
+    const link = list.links[index];
+    if (!link) return [];
+    const from = link.fromIndex < 0 ? activity.index : link.fromIndex;
+    const to = link.toIndex < 0 ? activity.index : link.toIndex;
+    if (from < 0 || to < 0) return [];
+    return [{ kind: 'add-link', from, to, type: link.type, lag: link.lag }];
+  });
+}
+
+/** A number where the IDs around it are kept as numbers. */
+function contentOf(list: ActivityList, activity: Activity, id: string): CellContent {
+  const neighbours = [activity, list.activities[activity.index - 1], list.activities[activity.index + 1]];
+  const known = neighbours.find((neighbour) => neighbour !== undefined && neighbour.idContent !== null);
+  const numeric = typeof known?.idContent === 'number' && String(Number(id)) === id;
+  return numeric ? Number(id) : id;
+}
+
+function reasonFor(list: ActivityList, { id, after, awaitedBy }: FreeId): string {
+  const owners = awaitedBy.flatMap((index) => {
+    const cell = list.linkCells[list.links[index]?.linkCell ?? -1];
+    const owner = cell && list.activities[cell.owner];
+    return owner ? [called(owner)] : [];
+  });
+  const place =
+    after === null ? `${id} is free.` : `${id} is free, and follows ${after} in the list's pattern.`;
+  if (owners.length === 0) return place;
+  return `${place} The links of ${joined([...new Set(owners)])} name it already.`;
+}
+
+/** Gives a row a free ID; nothing where it has no cell for one. */
+export function freeIdFix(list: ActivityList, activity: Activity): { fix?: Fix } {
+  const free = freeIds(list).get(activity.index);
+  if (!free || !activity.idCell) return {};
+  const { sheet } = activity.idCell;
+  const to = contentOf(list, activity, free.id);
+  return {
+    fix: {
+      reason: reasonFor(list, free),
+      edits: [{ sheet, cell: cellAddress(activity.idCell), from: activity.idContent, to }],
+      changes: linksGained(list, activity, free),
+    },
+  };
+}

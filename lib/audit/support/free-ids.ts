@@ -1,0 +1,129 @@
+import type { Activity } from '@/lib/schedule/activity';
+import type { ActivityList } from '@/lib/schedule/activity-list';
+import { canBeNamed } from './about';
+import { memberOf, type Series, seriesOf } from './id-pattern';
+import { memo } from './memo';
+
+/** A free ID for a row that has none of its own. */
+export interface FreeId {
+  readonly id: string;
+  /** The ID it follows in the list's pattern; null where it begins one. */
+  readonly after: string | null;
+  /** Links that name this ID already, by index into the list's links: they mean this row, it seems. */
+  readonly awaitedBy: readonly number[];
+}
+
+interface State {
+  readonly list: ActivityList;
+  readonly series: Map<string, Series>;
+  /** IDs in use, of activities and headings, and those proposed so far. */
+  readonly taken: Set<string>;
+  /** Links by the ID that they name and that is not in the list. */
+  readonly awaited: ReadonlyMap<string, readonly number[]>;
+  readonly proposed: Map<number, FreeId>;
+  /** The last suffix given to a word. */
+  readonly suffixes: Map<string, number>;
+}
+
+function awaitedIds(list: ActivityList): Map<string, number[]> {
+  const awaited = new Map<string, number[]>();
+  list.links.forEach((link, index) => {
+    const id = link.fromIndex < 0 ? link.from : link.toIndex < 0 ? link.to : null;
+    if (id === null) return;
+    const known = awaited.get(id);
+    if (known) known.push(index);
+    else awaited.set(id, [index]);
+  });
+  return awaited;
+}
+
+/** The ID of the row above (or below) on the same sheet, or the one proposed for it. */
+function neighbour({ list, proposed }: State, activity: Activity, direction: 1 | -1): string | null {
+  const next = list.activities[activity.index + direction];
+  if (!next || next.sheet !== activity.sheet) return null;
+  return proposed.get(next.index)?.id ?? (next.id === '' ? null : next.id);
+}
+
+/** The ID that is missing between the rows above and below: A4, –, A6 → A5. */
+function gapId(state: State, activity: Activity): FreeId | null {
+  const above = neighbour(state, activity, -1);
+  const member = above === null ? null : memberOf(above);
+  const series = member && state.series.get(member.series);
+  if (!member || !series) return null;
+  const number = member.number + series.step;
+  const below = memberOf(neighbour(state, activity, 1) ?? '');
+  const fits = !below || below.series !== member.series || below.number > number;
+  const id = series.write(number, series.width);
+  if (!fits || state.taken.has(id)) return null;
+  return { id, after: above, awaitedBy: state.awaited.get(id) ?? [] };
+}
+
+/** The ID after the last of a series; one that a link names already is left alone. */
+function nextId(state: State, series: Series): FreeId {
+  const after = series.write(series.last, series.width);
+  let number = series.last;
+  let id: string;
+  do {
+    number += series.step;
+    id = series.write(number, series.width);
+  } while (state.taken.has(id) || state.awaited.has(id));
+  series.last = number;
+  return { id, after, awaitedBy: [] };
+}
+
+const NEW_SERIES: Series = { last: 0, step: 1, width: 0, size: 0, write: String };
+
+/** The series of the row above or below, else the one with most members. */
+function seriesFor(state: State, activity: Activity): Series {
+  for (const direction of [-1, 1] as const) {
+    const member = memberOf(neighbour(state, activity, direction) ?? '');
+    const series = member && state.series.get(member.series);
+    if (series) return series;
+  }
+  let largest: Series | null = null;
+  for (const series of state.series.values()) {
+    if (largest === null || series.size > largest.size) largest = series;
+  }
+  if (largest) return largest;
+  const fresh = { ...NEW_SERIES };
+  state.series.set('\u0000', fresh);
+  return fresh;
+}
+
+/** START, START → START-2. */
+function suffixed(state: State, id: string): FreeId {
+  let number = (state.suffixes.get(id) ?? 1) + 1;
+  while (state.taken.has(`${id}-${number}`) || state.awaited.has(`${id}-${number}`)) number += 1;
+  state.suffixes.set(id, number);
+  return { id: `${id}-${number}`, after: id, awaitedBy: [] };
+}
+
+function propose(state: State, activity: Activity): FreeId {
+  const own = memberOf(activity.id);
+  if (activity.id !== '' && !own) return suffixed(state, activity.id);
+  const gap = gapId(state, activity);
+  const sameSeries = !own || (gap !== null && memberOf(gap.id)?.series === own.series);
+  if (gap && sameSeries) return gap;
+  const series = own ? state.series.get(own.series) : undefined;
+  return nextId(state, series ?? seriesFor(state, activity));
+}
+
+/**
+ * A free ID in the list's pattern for each row that has none, or one that an earlier row bears already, by
+ * index of the activity: the one missing between the rows around it, else the next after the last. No two
+ * rows are given the same. Linear in the list.
+ */
+export const freeIds = memo((list: ActivityList): ReadonlyMap<number, FreeId> => {
+  const taken = new Set(list.indexOf.keys());
+  for (const heading of list.headings) taken.add(heading.id);
+  const proposed = new Map<number, FreeId>();
+  const series = seriesOf(list.indexOf.keys());
+  const state = { list, series, taken, awaited: awaitedIds(list), proposed, suffixes: new Map() };
+  for (const activity of list.activities) {
+    if (canBeNamed(list, activity) || activity.idError !== null) continue;
+    const proposal = propose(state, activity);
+    taken.add(proposal.id);
+    proposed.set(activity.index, proposal);
+  }
+  return proposed;
+});
