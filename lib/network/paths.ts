@@ -14,7 +14,7 @@ export interface CriticalPaths {
   readonly variance: number;
   /** By activity; the path with the largest variance first, at most `limit`. */
   readonly listed: readonly (readonly number[])[];
-  /** Exact up to 2^53; Infinity beyond. */
+  /** Exact up to 2^53, beyond that to sixteen digits; Infinity beyond the largest double. */
   readonly count: number;
 }
 
@@ -101,8 +101,7 @@ function countPaths(count: number, graph: CriticalGraph, ends: readonly number[]
     for (let k = graph.start[r]!; k < graph.end[r]!; k++) sum += paths[graph.driver[k]!]!;
     paths[r] = sum;
   }
-  const total = ends.reduce((sum, r) => sum + paths[r]!, 0);
-  return total <= Number.MAX_SAFE_INTEGER ? total : Infinity;
+  return ends.reduce((sum, r) => sum + paths[r]!, 0);
 }
 
 /** Up to `limit` paths, walked back from the ends; every step back leads to a path, so none is in vain. */

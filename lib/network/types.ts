@@ -55,7 +55,7 @@ export type Analysis =
       readonly standardDeviation: number;
       /** The path whose variance is reported stands first; up to 50 are listed. */
       readonly criticalPaths: readonly (readonly number[])[];
-      /** Exact up to 2^53; Infinity beyond. */
+      /** Exact up to 2^53, beyond that to sixteen digits; Infinity beyond the largest double. */
       readonly criticalPathCount: number;
       readonly times: Times;
     }
