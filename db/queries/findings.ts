@@ -125,3 +125,18 @@ export async function deleteFindings(tx: Tx, submissionId: string, ids: readonly
     .delete(findings)
     .where(and(eq(findings.submissionId, submissionId), inArray(findings.id, [...ids])));
 }
+
+/** Ids of the findings with these keys, in their order. */
+export async function listFindingIds(
+  tx: Tx,
+  submissionId: string,
+  keys: readonly string[],
+): Promise<string[]> {
+  if (keys.length === 0) return [];
+  const rows = await tx
+    .select({ id: findings.id })
+    .from(findings)
+    .where(and(eq(findings.submissionId, submissionId), inArray(findings.key, [...keys])))
+    .orderBy(asc(findings.position), asc(findings.id));
+  return rows.map((row) => row.id);
+}

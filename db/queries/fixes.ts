@@ -2,7 +2,7 @@ import { and, asc, eq, inArray, sql } from 'drizzle-orm';
 import type { CellEdit } from '@/lib/schedule/edit';
 import type { FixState } from '@/lib/schedule/weight';
 import type { Tx } from '../client';
-import { fixes } from '../schema';
+import { findings, fixes } from '../schema';
 import { inBatches } from './bulk';
 
 /** As a statement takes it: all that can change of a fix, and what it hangs from. */
@@ -74,4 +74,14 @@ export async function listFixes(tx: Tx, submissionId: string) {
 export async function deleteFixes(tx: Tx, submissionId: string, ids: readonly string[]): Promise<void> {
   if (ids.length === 0) return;
   await tx.delete(fixes).where(and(eq(fixes.submissionId, submissionId), inArray(fixes.id, [...ids])));
+}
+
+/** Keys of the findings whose proposed fix was declined. */
+export async function listDeclined(tx: Tx, submissionId: string): Promise<Set<string>> {
+  const rows = await tx
+    .select({ key: findings.key })
+    .from(fixes)
+    .innerJoin(findings, eq(findings.id, fixes.findingId))
+    .where(and(eq(fixes.submissionId, submissionId), eq(fixes.rank, 0), eq(fixes.state, 'declined')));
+  return new Set(rows.map((row) => row.key));
 }

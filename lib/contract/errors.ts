@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import type { z } from 'zod';
 
 export interface FieldError {
   /** `edits.0.cell`; '' where the whole is at fault. */

@@ -164,7 +164,10 @@ export const correctionResult = z.object({
 });
 export type CorrectionResult = z.infer<typeof correctionResult>;
 
-/** PATCH /submissions/{id}/fixes/{fix}: decline, or propose again. */
+/** DELETE /corrections/{correction}: with the version, it is refused where someone else was first. */
+export const undoQuery = z.object({ version: z.coerce.number().int().min(0).optional() });
+
+/** PATCH /submissions/{id}/fixes/{fix}: decline, or propose again; answers as a correction does. */
 export const fixUpdate = z.object({ state: z.enum(['declined', 'proposed']), version: z.int().min(0) });
 
 export const analysisQuery = z.object({ state: scheduleState.default('corrected') });

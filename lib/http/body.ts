@@ -1,4 +1,4 @@
-import type { UploadedFile } from '@/lib/contract/answer';
+import type { Form, UploadedFile } from '@/lib/contract/transfer';
 import { Malformed, TooLarge, UnsupportedMedia } from '@/lib/contract/errors';
 import { limitedBody, MEGABYTE } from './limited';
 
@@ -7,11 +7,6 @@ const JSON_LIMIT = 12 * MEGABYTE;
 /** What the form may hold around the file. */
 const FORM_SLACK = MEGABYTE;
 const FILE_SENTENCE = 'The file is larger than 20 MB, so it was not taken.';
-
-export interface Form {
-  readonly file: UploadedFile | null;
-  readonly fields: Readonly<Record<string, readonly string[]>>;
-}
 
 /** JSON of a request; null where it has no body. */
 export async function readJson(request: Request): Promise<unknown> {

@@ -1,4 +1,4 @@
-import type { Download } from '@/lib/contract/answer';
+import type { Download } from '@/lib/contract/transfer';
 
 export function downloadResponse(file: Download): Response {
   return new Response(new Uint8Array(file.bytes), {

@@ -1,4 +1,4 @@
-import type { EventStream } from '@/lib/contract/answer';
+import type { EventStream } from '@/lib/contract/transfer';
 import { log } from './log';
 
 const HEARTBEAT_MS = 15_000;

@@ -1,8 +1,8 @@
 import { authenticate, officeContext } from '@/lib/access/authenticate';
 import type { Identity, OfficeContext } from '@/lib/access/context';
 import { bearerToken } from '@/lib/access/token';
-import { Download, EventStream } from '@/lib/contract/answer';
-import { readForm, readJson, type Form } from './body';
+import { Download, EventStream, type Form } from '@/lib/contract/transfer';
+import { readForm, readJson } from './body';
 import { downloadResponse } from './download';
 import { eventStreamResponse } from './event-stream';
 import { problemResponse } from './problem';

@@ -6,10 +6,10 @@ import { ruleView } from '@/lib/contract/rule';
 import { items } from '@/lib/contract/shared';
 import * as submission from '@/lib/contract/submission';
 import type { Operation } from './operation';
+import { ofSubmission } from './submission-operations';
 
 const OFFICE = '/api/offices/{office}';
 const PROJECT = `${OFFICE}/projects/{project}`;
-const SUBMISSION = `${OFFICE}/submissions/{submission}`;
 
 /** As a form sends it: `columns` is JSON, and everything is text. */
 const uploadForm = z.object({
@@ -24,10 +24,6 @@ const submissionForm = uploadForm.extend({
     .optional()
     .describe('`true` takes in a file although it is byte for byte the latest revision.'),
 });
-
-const stale = {
-  409: 'Someone else was first (`version` is the present one), or the submission is closed to corrections.',
-};
 
 const atLarge: readonly Operation[] = [
   {
@@ -216,134 +212,6 @@ const inOffice: readonly Operation[] = [
     status: 201,
     answer: submission.submissionView,
     problems: { 409: 'It is byte for byte the latest revision.' },
-  },
-];
-
-const ofSubmission: readonly Operation[] = [
-  {
-    id: 'getSubmission',
-    method: 'get',
-    path: SUBMISSION,
-    tag: 'submissions',
-    summary: 'One revision, with its counts and figures.',
-    answer: submission.submissionView,
-  },
-  {
-    id: 'listActivities',
-    method: 'get',
-    path: `${SUBMISSION}/activities`,
-    tag: 'submissions',
-    summary: 'Its activities, in a state of the schedule.',
-    query: submission.activitiesQuery,
-    answer: items(submission.activityView),
-  },
-  {
-    id: 'listFindings',
-    method: 'get',
-    path: `${SUBMISSION}/findings`,
-    tag: 'audit',
-    summary: 'Its findings, each with its fix.',
-    answer: items(submission.findingView),
-  },
-  {
-    id: 'listCorrections',
-    method: 'get',
-    path: `${SUBMISSION}/corrections`,
-    tag: 'corrections',
-    summary: 'What was adopted and holds, in order.',
-    answer: items(submission.correctionView),
-  },
-  {
-    id: 'createCorrections',
-    method: 'post',
-    path: `${SUBMISSION}/corrections`,
-    tag: 'corrections',
-    summary: 'Adopts fixes, or edits cells by hand.',
-    body: submission.correctionCreate,
-    status: 201,
-    answer: submission.correctionResult,
-    problems: stale,
-  },
-  {
-    id: 'undoCorrection',
-    method: 'delete',
-    path: `${SUBMISSION}/corrections/{correction}`,
-    tag: 'corrections',
-    summary: 'Undoes one correction, or all of a batch.',
-    answer: submission.correctionResult,
-    problems: stale,
-  },
-  {
-    id: 'updateFix',
-    method: 'patch',
-    path: `${SUBMISSION}/fixes/{fix}`,
-    tag: 'corrections',
-    summary: 'Declines a fix, or proposes it again.',
-    body: submission.fixUpdate,
-    answer: submission.findingView,
-    problems: stale,
-  },
-  {
-    id: 'getAnalysis',
-    method: 'get',
-    path: `${SUBMISSION}/analysis`,
-    tag: 'figures',
-    summary: 'The recomputed network.',
-    query: submission.analysisQuery,
-    answer: submission.analysisView,
-  },
-  {
-    id: 'getChance',
-    method: 'get',
-    path: `${SUBMISSION}/chance`,
-    tag: 'figures',
-    summary: 'The chance of a finish, or the finish for a chance: exactly one of days, date, confidence.',
-    query: submission.chanceQuery,
-    answer: submission.chanceView,
-    problems: { 409: 'It cannot be computed; `because` holds the ids of the findings in the way.' },
-  },
-  {
-    id: 'getWorkbook',
-    method: 'get',
-    path: `${SUBMISSION}/workbook`,
-    tag: 'submissions',
-    summary: 'The file as received, or with the corrected cells changed.',
-    query: submission.workbookQuery,
-    answer: { mediaType: 'application/octet-stream', about: 'The file, in its own format.' },
-  },
-  {
-    id: 'listComments',
-    method: 'get',
-    path: `${SUBMISSION}/comments`,
-    tag: 'comments',
-    summary: 'Its comments; for a scheduler the shared ones.',
-    answer: items(submission.commentView),
-  },
-  {
-    id: 'createComment',
-    method: 'post',
-    path: `${SUBMISSION}/comments`,
-    tag: 'comments',
-    summary: 'Comments on a finding, a row or the whole.',
-    body: submission.commentCreate,
-    status: 201,
-    answer: submission.commentView,
-  },
-  {
-    id: 'getRecord',
-    method: 'get',
-    path: `${SUBMISSION}/record`,
-    tag: 'record',
-    summary: 'Who did what when; each entry carries the hash of the one before.',
-    answer: items(submission.recordEntryView),
-  },
-  {
-    id: 'streamEvents',
-    method: 'get',
-    path: `${SUBMISSION}/events`,
-    tag: 'comments',
-    summary: 'What changes, as it does.',
-    answer: { mediaType: 'text/event-stream', about: 'Events named comment, correction, fix, status.' },
   },
 ];
 

@@ -1,7 +1,7 @@
 import { subscribe } from '@/db/listen';
 import type { OfficeContext } from '@/lib/access/context';
 import { requirePermission } from '@/lib/access/permissions';
-import { EventStream } from '@/lib/contract/answer';
+import { EventStream } from '@/lib/contract/transfer';
 import { submissionEvent } from '@/lib/contract/submission';
 import { idOf, inOffice } from '@/lib/services/in-office';
 import { requireSubmission } from '@/lib/services/submissions/require';

@@ -23,3 +23,9 @@ export interface UploadedFile {
   readonly name: string;
   readonly bytes: Uint8Array;
 }
+
+/** A multipart form with at most one file that counts. */
+export interface Form {
+  readonly file: UploadedFile | null;
+  readonly fields: Readonly<Record<string, readonly string[]>>;
+}

@@ -1,0 +1,53 @@
+import type { NewFinding } from '@/db/queries/findings';
+import type { FixValues } from '@/db/queries/fixes';
+import type { Finding } from '@/lib/audit';
+import { prepareEffects, type Effect } from '@/lib/network';
+import type { Fix } from '@/lib/schedule/edit';
+import { computed, type ReadState } from '@/lib/services/schedule/state';
+
+export type FixDraft = Pick<FixValues, 'rank' | 'reason' | 'edits' | 'effect_expected' | 'effect_variance'>;
+
+/** A finding as the audit has it, in the columns that say what it is. */
+export type FindingDraft = Omit<NewFinding, 'id' | 'origin' | 'position'> & {
+  readonly fixes: readonly FixDraft[];
+};
+
+/** What the audit of a state found, with the finish effect of each fix; null effects where it is not computable. */
+export function draftFindings(state: ReadState): FindingDraft[] {
+  const effects = computed(state) ? prepareEffects(state.network) : null;
+  return state.findings.map((finding) => ({
+    key: finding.key,
+    rule: finding.rule,
+    weight: finding.weight,
+    message_id: finding.message,
+    data: finding.data,
+    activity_id: finding.activityId,
+    activity_name: nameOf(finding, state),
+    sheet: finding.sheet,
+    row: finding.row,
+    cell: finding.cell,
+    fixes: fixesOf(finding).map((fix, rank) => draftFix(fix, rank, effects?.effect(fix.changes) ?? null)),
+  }));
+}
+
+/** The one proposed first, then the others. */
+function fixesOf({ fix, alternatives = [] }: Finding): readonly Fix[] {
+  return fix ? [fix, ...alternatives] : alternatives;
+}
+
+function draftFix({ reason, edits }: Fix, rank: number, effect: Effect | null): FixDraft {
+  return {
+    rank,
+    reason,
+    edits,
+    // Adding 0 makes −0 an ordinary 0, as it comes back from the database.
+    effect_expected: effect && effect.expectedDuration + 0,
+    effect_variance: effect && effect.variance + 0,
+  };
+}
+
+function nameOf({ activityId }: Finding, { list }: ReadState): string | null {
+  if (activityId === null) return null;
+  const index = list.indexOf.get(activityId);
+  return index === undefined ? null : (list.activities[index]?.name ?? null);
+}
