@@ -54,9 +54,13 @@ export function readCsv(bytes: Uint8Array): Sheet {
   };
 }
 
-/** `="007"` is how a text is kept a text when a spreadsheet opens the file. */
+/**
+ * `="007"` is how a text is kept a text when a spreadsheet opens the file, and an apostrophe before
+ * = + - @ is how one is kept from becoming a formula (OWASP ASVS 5, 1.2.10).
+ */
 function cellText(value: string): string {
   const text = value.includes('\r') ? value.replace(/\r\n?/g, '\n') : value;
+  if (/^'[=+\-@\t\n]/.test(text)) return text.slice(1);
   if (!text.startsWith('="')) return text;
   return /^="([^"]*)"$/.exec(text)?.[1] ?? text;
 }
