@@ -97,6 +97,7 @@ export interface FindingChange {
   readonly weight: Weight;
   readonly message_id: string;
   readonly data: MessageData;
+  readonly activity_name: string | null;
   readonly row: number | null;
   readonly cell: string | null;
 }
@@ -112,9 +113,10 @@ export async function updateFindings(
     rows,
     (json) => sql`
       update findings f
-      set state = r.state, weight = r.weight, message_id = r.message_id, data = r.data, row = r.row, cell = r.cell
+      set state = r.state, weight = r.weight, message_id = r.message_id, data = r.data,
+          activity_name = r.activity_name, row = r.row, cell = r.cell
       from json_to_recordset(${json})
-        as r(id uuid, state text, weight text, message_id text, data jsonb, row int, cell text)
+        as r(id uuid, state text, weight text, message_id text, data jsonb, activity_name text, row int, cell text)
       where f.id = r.id and f.submission_id = ${submissionId}`,
   );
 }

@@ -118,3 +118,8 @@ export async function setPassword(tx: Tx, userId: string, passwordHash: string):
     .set({ passwordHash, sessionEpoch: sql`${users.sessionEpoch} + 1` })
     .where(eq(users.id, userId));
 }
+
+export async function hasOffice(tx: Tx, slug: string): Promise<boolean> {
+  const rows = await tx.select({ id: offices.id }).from(offices).where(eq(offices.slug, slug));
+  return rows.length > 0;
+}

@@ -156,6 +156,8 @@ export const correctionResult = z.object({
   items: z.array(correctionView),
   /** Fixes asked for that could not be adopted, and why. */
   skipped: z.array(z.object({ fix: uuid, reason: z.string() })),
+  /** Corrections that hold, but of which an edit finds nothing to change any more after an undoing. */
+  inapplicable: z.array(z.object({ correction: uuid, reason: z.string() })),
   version: z.int(),
   submission: submissionView,
   /** Findings whose state or fix changed, new ones included; `gone` are those a correction had made and that vanished. */

@@ -4,6 +4,8 @@ export class Download {
     readonly name: string,
     readonly mediaType: string,
     readonly bytes: Uint8Array,
+    /** Further headers of the answer. */
+    readonly headers: Readonly<Record<string, string>> = {},
   ) {}
 }
 

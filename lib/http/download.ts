@@ -3,6 +3,7 @@ import type { Download } from '@/lib/contract/transfer';
 export function downloadResponse(file: Download): Response {
   return new Response(new Uint8Array(file.bytes), {
     headers: {
+      ...file.headers,
       'content-type': file.mediaType,
       'content-length': String(file.bytes.byteLength),
       'content-disposition': attachment(file.name),

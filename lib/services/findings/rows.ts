@@ -1,5 +1,6 @@
 import type { NewFinding } from '@/db/queries/findings';
 import type { FixValues } from '@/db/queries/fixes';
+import { storable } from '@/db/storable';
 import type { Finding } from '@/lib/audit';
 import { prepareEffects, type Effect } from '@/lib/network';
 import type { Fix } from '@/lib/schedule/edit';
@@ -15,7 +16,7 @@ export type FindingDraft = Omit<NewFinding, 'id' | 'origin' | 'position'> & {
 /** What the audit of a state found, with the finish effect of each fix; null effects where it is not computable. */
 export function draftFindings(state: ReadState): FindingDraft[] {
   const effects = computed(state) ? prepareEffects(state.network) : null;
-  return state.findings.map((finding) => ({
+  const drafts = state.findings.map((finding) => ({
     key: finding.key,
     rule: finding.rule,
     weight: finding.weight,
@@ -28,6 +29,12 @@ export function draftFindings(state: ReadState): FindingDraft[] {
     cell: finding.cell,
     fixes: fixesOf(finding).map((fix, rank) => draftFix(fix, rank, effects?.effect(fix.changes) ?? null)),
   }));
+  return asStored(drafts);
+}
+
+/** As it will come back from the database, so that the two can be compared. */
+function asStored<T>(value: T): T {
+  return storable(JSON.parse(JSON.stringify(value)) as T);
 }
 
 /** The one proposed first, then the others. */
@@ -40,9 +47,8 @@ function draftFix({ reason, edits }: Fix, rank: number, effect: Effect | null): 
     rank,
     reason,
     edits,
-    // Adding 0 makes −0 an ordinary 0, as it comes back from the database.
-    effect_expected: effect && effect.expectedDuration + 0,
-    effect_variance: effect && effect.variance + 0,
+    effect_expected: effect && effect.expectedDuration,
+    effect_variance: effect && effect.variance,
   };
 }
 

@@ -14,6 +14,7 @@ interface Verbs {
   'member disabled': MemberData;
   'member enabled': MemberData;
   'password set': { email: string };
+  'token made': { email: string; name: string; readOnly: boolean };
   'project added': { project: string; code: string };
   'project changed': { project: string; code: string; fields: string[] };
 }
@@ -53,6 +54,8 @@ const SENTENCES: { [V in RecordVerb]: (data: Verbs[V]) => string } = {
   'member disabled': (d) => `Took the membership of ${d.name} (${d.email}) away.`,
   'member enabled': (d) => `Gave the membership of ${d.name} (${d.email}) back.`,
   'password set': (d) => `${d.email} set a password by invitation.`,
+  'token made': (d) =>
+    `Made the API token “${d.name}” for ${d.email}${d.readOnly ? ', for reading only' : ''}.`,
   'project added': (d) => `Added the project ${d.code}.`,
   'project changed': (d) => `Changed ${d.fields.join(', ')} of the project ${d.code}.`,
 };

@@ -3,6 +3,8 @@ import { chanceBy } from '@/lib/estimates';
 import type { Analysis } from '@/lib/network';
 import { dateOfFinish, workingDaysThrough, type WorkCalendar } from '@/lib/schedule/calendar';
 import type { ScheduleState } from '@/lib/schedule/weight';
+import { proposeState } from '@/lib/services/schedule/propose';
+import { computed, type Reading, type ReadState } from '@/lib/services/schedule/state';
 
 /** What turns working days into dates. */
 export interface ProjectDates {
@@ -39,5 +41,24 @@ export function redated(figures: Figures, { start, targetFinish, calendar }: Pro
       targetFinish === null
         ? null
         : chanceBy(workingDaysThrough(calendar, start, targetFinish), expectedDuration, standardDeviation),
+  };
+}
+
+/**
+ * The figures as corrected and, where these cannot be computed, with the proposed fixes of the blocking
+ * findings adopted as well.
+ */
+export async function correctedFigures(
+  corrected: ReadState,
+  how: Reading,
+  declined: ReadonlySet<string>,
+  dates: ProjectDates,
+): Promise<{ corrected: Figures; proposed: Figures | null }> {
+  const analysis = computed(corrected);
+  if (analysis) return { corrected: figuresOf('corrected', analysis, dates), proposed: null };
+  const proposed = await proposeState(corrected, how, declined);
+  return {
+    corrected: figuresOf('corrected', null, dates),
+    proposed: figuresOf('proposed', computed(proposed), dates),
   };
 }
