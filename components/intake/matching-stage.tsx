@@ -49,7 +49,7 @@ export function MatchingStage({ stage, intake }: Props) {
         {view.sheets.length > 1 && (
           <SheetChoice sheets={view.sheets} chosen={draft.sheets} onChange={setSheets} />
         )}
-        <p role="status" className="mb-2 min-h-5 text-slate">
+        <p role="status" className="min-h-5 text-slate">
           {said || (stage.rereading ? 'Reading it anew …' : '')}
         </p>
         {shown && (

@@ -25,13 +25,13 @@ export function SampleTable({ sample, stale }: { sample: readonly Row[]; stale: 
   const days = (value: number | null) => (value === null ? '' : format.days(value));
   return (
     <div aria-busy={stale} className={stale ? 'opacity-60' : ''}>
-      <Table label="The first rows, as they will be read">
+      <Table label="Table of the first rows">
         <thead>
           <tr>
             <Th numeric>Row</Th>
             <Th>Read as</Th>
             <Th>ID</Th>
-            <Th>Name</Th>
+            <Th className="w-full">Name</Th>
             <Th numeric>a</Th>
             <Th numeric>m</Th>
             <Th numeric>b</Th>
@@ -44,11 +44,16 @@ export function SampleTable({ sample, stale }: { sample: readonly Row[]; stale: 
               <Td numeric className="text-slate">
                 {row.row}
               </Td>
-              <Td className={classes(row.kind === 'refused' && 'font-semibold text-umber')}>
+              <Td
+                className={classes(
+                  row.kind === 'refused' && 'font-semibold text-umber',
+                  row.reason ? 'min-w-60' : 'whitespace-nowrap',
+                )}
+              >
                 {KINDS[row.kind]}
                 {row.reason && <span className="block font-normal text-slate">{row.reason}</span>}
               </Td>
-              <Td className="font-semibold">{row.id}</Td>
+              <Td className="font-semibold whitespace-nowrap">{row.id}</Td>
               <Td className="min-w-40">{row.name}</Td>
               <Td numeric>{days(row.optimistic)}</Td>
               <Td numeric>{days(row.likely)}</Td>

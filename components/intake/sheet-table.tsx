@@ -28,7 +28,7 @@ export function SheetTable({ view, sheet, draft, onField, onHeader }: Props) {
         role="region"
         aria-label={`Sheet ${sheet.name} as it came`}
         tabIndex={0}
-        className="max-w-full overflow-x-auto"
+        className="relative max-w-full overflow-x-auto"
       >
         <table className="border-collapse bg-leaf">
           <caption className="sr-only">Sheet {sheet.name} with what each column holds</caption>

@@ -8,7 +8,7 @@ import { ErrorState, Loading } from '@/components/ui/states';
 import { useMembers } from '@/lib/client/members';
 import type { InvitationView } from '@/lib/contract/office';
 import { InvitationDialog } from './invitation-dialog';
-import { MemberTable } from './member-table';
+import { MemberList } from './member-list';
 import { NewMember } from './new-member';
 
 /** Who belongs to the office, and a new person with a one-time link. */
@@ -26,7 +26,7 @@ export function PeoplePage() {
         )}
         {members.data && (
           <>
-            <MemberTable members={members.data} onInvited={setInvitation} />
+            <MemberList members={members.data} onInvited={setInvitation} />
             <NewMember onInvited={setInvitation} />
           </>
         )}

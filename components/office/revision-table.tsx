@@ -12,7 +12,7 @@ import type { Figures, SubmissionView } from '@/lib/contract/submission';
 /** Revision by revision: findings, and the figures as received → as corrected. */
 export function RevisionTable({ revisions }: { revisions: readonly SubmissionView[] }) {
   return (
-    <Table label="Revisions">
+    <Table label="Table of the revisions">
       <thead>
         <tr>
           <Th>Revision</Th>

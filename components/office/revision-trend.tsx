@@ -6,10 +6,10 @@ import type { SubmissionView } from '@/lib/contract/submission';
 import { axisMarks, findingsTrend, finishTrend, movement, type TrendPoint } from './trend';
 
 const WIDTH = 360;
-const HEIGHT = 160;
+const HEIGHT = 176;
 const LEFT = 52;
 const RIGHT = 16;
-const TOP = 20;
+const TOP = 36;
 const BOTTOM = 28;
 
 /** How the findings and the expected finish moved over the revisions; the table above holds the figures. */
@@ -26,24 +26,24 @@ export function RevisionTrend({ revisions }: { revisions: readonly SubmissionVie
         <Trend points={finish} write={(value) => format.number(value, 1)} unit="d" />
       </Panel>
       <Panel title={findingsTitle(findings)} sub="Findings of each revision as it came in and was worked on.">
-        <Trend points={findings} write={(value) => format.count(value)} unit="findings" />
+        <Trend points={findings} write={(value) => format.count(value)} unit="findings" fromZero />
       </Panel>
     </div>
   );
 }
 
-function Trend({
-  points,
-  write,
-  unit,
-}: {
+interface TrendProps {
   points: readonly TrendPoint[];
   write: (value: number) => string;
   unit: string;
-}) {
+  /** For counts, which mean nothing without their zero. */
+  fromZero?: boolean;
+}
+
+function Trend({ points, write, unit, fromZero = false }: TrendProps) {
   const known = points.flatMap(({ value }) => (value === null ? [] : [value]));
   if (known.length === 0) return <p className="text-slate">No revision can be computed yet.</p>;
-  const marks = axisMarks(known);
+  const marks = axisMarks(fromZero ? [0, ...known] : known);
   const low = marks[0] ?? 0;
   const high = marks.at(-1) ?? 1;
   const x = (index: number) =>
@@ -53,16 +53,16 @@ function Trend({
     value === null ? [] : [{ revision, value, x: x(index), y: y(value) }],
   );
   return (
-    <svg viewBox={`0 0 ${String(WIDTH)} ${String(HEIGHT)}`} className="w-full max-w-lg" aria-hidden="true">
+    <svg viewBox={`0 0 ${String(WIDTH)} ${String(HEIGHT)}`} className="w-full max-w-90" aria-hidden="true">
       {marks.map((mark) => (
         <g key={mark}>
           <path d={`M${String(LEFT)} ${String(y(mark))}H${String(WIDTH - RIGHT)}`} stroke="var(--hair)" />
-          <text x={LEFT - 8} y={y(mark) + 4} textAnchor="end" fontSize="12" fill="var(--slate)">
+          <text x={LEFT - 8} y={y(mark) + 4} textAnchor="end" fontSize="14" fill="var(--slate)">
             {write(mark)}
           </text>
         </g>
       ))}
-      <text x="0" y="12" fontSize="12" fill="var(--slate)">
+      <text x="0" y="14" fontSize="14" fill="var(--slate)">
         {unit}
       </text>
       <polyline
@@ -78,7 +78,7 @@ function Trend({
             x={point.x}
             y={point.y - 9}
             textAnchor="middle"
-            fontSize="12"
+            fontSize="14"
             fontWeight="600"
             fill="var(--ink)"
           >
@@ -92,7 +92,7 @@ function Trend({
           x={x(index)}
           y={HEIGHT - 8}
           textAnchor="middle"
-          fontSize="12"
+          fontSize="14"
           fill="var(--slate)"
         >
           Rev {revision}

@@ -1,5 +1,7 @@
 'use client';
 
+import type { ReactNode } from 'react';
+import { DateText } from '@/components/ui/date-text';
 import { Field, Input, Select, Textarea } from '@/components/ui/field';
 import { holidayError, type ProjectDraft } from './project-draft';
 
@@ -17,7 +19,7 @@ export function ScheduleFields({ draft, errors, onChange }: Props) {
     <>
       <Field
         label="Start"
-        hint="The first working day, time 0 of the schedule."
+        hint={<DateHint date={draft.start}>The first working day, time 0 of the schedule.</DateHint>}
         error={errors.start}
         required
       >
@@ -30,7 +32,11 @@ export function ScheduleFields({ draft, errors, onChange }: Props) {
           />
         )}
       </Field>
-      <Field label="Target finish" hint="The date the chance is given for." error={errors.targetFinish}>
+      <Field
+        label="Target finish"
+        hint={<DateHint date={draft.targetFinish}>The date the chance is given for.</DateHint>}
+        error={errors.targetFinish}
+      >
         {(aria) => (
           <Input
             {...aria}
@@ -85,6 +91,21 @@ export function ScheduleFields({ draft, errors, onChange }: Props) {
           />
         )}
       </Field>
+    </>
+  );
+}
+
+/** The browser writes dates in its own way; this says which day was meant. */
+function DateHint({ date, children }: { date: string; children: ReactNode }) {
+  return (
+    <>
+      {children}
+      {date !== '' && (
+        <>
+          {' '}
+          <DateText value={date} />
+        </>
+      )}
     </>
   );
 }

@@ -27,10 +27,11 @@ export function AccountMenu({ onKeys }: { onKeys: () => void }) {
   };
   return (
     <DropdownMenu.Root
+      modal={false}
       onOpenChange={(open) => open && setTheme(parseTheme(document.documentElement.dataset.theme))}
     >
       <DropdownMenu.Trigger
-        aria-label={`Account of ${office.me.name}`}
+        aria-label={`${initials(office.me.name)}, account of ${office.me.name}`}
         className="grid size-8 place-items-center rounded border border-ink bg-leaf font-semibold text-ink hover:bg-tint"
       >
         {initials(office.me.name)}

@@ -25,10 +25,10 @@ export function Door({ title, sub, children }: { title: string; sub?: ReactNode;
           {sub && <div className="mt-1 text-slate">{sub}</div>}
           <div className="mt-4">{children}</div>
         </main>
-        <p className="mt-6 max-w-md text-slate">
+        <footer className="mt-6 max-w-md text-slate">
           A contractor’s activity list comes in; what is wrong with it, what sets the finish and how sure the
           date is come out.
-        </p>
+        </footer>
       </div>
     </div>
   );

@@ -16,7 +16,8 @@ export function OfficeShell({ slug, children }: { slug: string; children: ReactN
     return (
       <div className="flex min-h-dvh flex-col">
         <MastheadFrame home="/" />
-        <main id="main" className="mx-auto w-full max-w-3xl px-4 py-8 sm:px-6">
+        <main id="main" className="w-full max-w-4xl px-4 py-8 sm:px-6">
+          <h1 className="sr-only">Office</h1>
           {office.error ? (
             <ErrorState error={office.error} retry={() => void office.refetch()}>
               <p className="mt-2">

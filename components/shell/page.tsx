@@ -18,7 +18,7 @@ export function Page({ title, sub, aside, narrow = false, children }: PageProps)
     <main
       id="main"
       tabIndex={-1}
-      className={classes('mx-auto w-full px-4 pt-5 pb-8 sm:px-6', narrow ? 'max-w-3xl' : 'max-w-[1600px]')}
+      className={classes('w-full px-4 pt-5 pb-8 sm:px-6', narrow ? 'max-w-4xl' : 'max-w-[1800px]')}
     >
       <div className="mb-4 flex flex-wrap items-start justify-between gap-x-7 gap-y-3 border-b border-hair pb-4">
         <div className="min-w-0">

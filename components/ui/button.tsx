@@ -56,6 +56,20 @@ export function ButtonLink({
   );
 }
 
+/** For an address that is no page of ours, such as a file to download. */
+export function ButtonAnchor({
+  variant = 'solid',
+  className,
+  children,
+  ...rest
+}: Omit<Looks, 'shortcut'> & ComponentProps<'a'>) {
+  return (
+    <a {...rest} className={classes(looks(variant), 'no-underline', className)}>
+      {children}
+    </a>
+  );
+}
+
 const BASE =
   'inline-flex min-h-8 items-center justify-center gap-2 rounded border px-3 py-1 text-sm font-semibold ' +
   'disabled:cursor-not-allowed disabled:opacity-50 aria-disabled:cursor-progress aria-disabled:opacity-60';

@@ -7,6 +7,8 @@ export interface Hotkey {
   key: string;
   /** What it does, for the list of keys: "Next finding". */
   does: string;
+  /** Holding the key goes on; without it a held key acts once. */
+  repeats?: boolean;
   run: (event: KeyboardEvent) => void;
 }
 export interface HotkeyGroup {
@@ -17,7 +19,7 @@ export interface HotkeyGroup {
 const SWITCH = 'plumbrow-keys';
 /** Where a key is text, a choice, or meant for what lies on top of the page. */
 const BUSY =
-  'input, textarea, select, [contenteditable="true"], [role="menu"], [role="listbox"], [role="dialog"]';
+  'input:not([type="radio"], [type="checkbox"]), textarea, select, [contenteditable="true"], [role="menu"], [role="listbox"], [role="dialog"]';
 const groups = new Map<object, HotkeyGroup>();
 const listeners = new Set<() => void>();
 let listed: readonly HotkeyGroup[] = [];
@@ -27,7 +29,7 @@ export function useHotkeys(title: string, keys: readonly Hotkey[], enabled = tru
   const onKey = useEffectEvent((event: KeyboardEvent) => {
     if (!mayAct(event)) return;
     const found = keys.find(({ key }) => key === event.key);
-    if (!found) return;
+    if (!found || (event.repeat && !found.repeats)) return;
     event.preventDefault();
     found.run(event);
   });
@@ -74,7 +76,15 @@ function hotkeysOn(): boolean {
 
 /** Not while typing, choosing or in a dialog; not with a modifier, which belongs to the browser. */
 export function mayAct(event: KeyboardEvent): boolean {
-  if (event.defaultPrevented || event.ctrlKey || event.metaKey || event.altKey || !hotkeysOn()) return false;
+  if (
+    event.isComposing ||
+    event.defaultPrevented ||
+    event.ctrlKey ||
+    event.metaKey ||
+    event.altKey ||
+    !hotkeysOn()
+  )
+    return false;
   const target = event.target instanceof Element ? event.target : document.body;
   if (target.closest(BUSY)) return false;
   return document.querySelector('[data-hotkeys="held"]') === null;

@@ -4,7 +4,7 @@ import { classes } from './classes';
 /** A table that scrolls sideways by itself where the page is narrow; `label` names it. */
 export function Table({ label, className, children, ...rest }: { label: string } & ComponentProps<'table'>) {
   return (
-    <div role="region" aria-label={label} tabIndex={0} className="max-w-full overflow-x-auto">
+    <div role="region" aria-label={label} tabIndex={0} className="relative max-w-full overflow-x-auto">
       <table {...rest} className={classes('w-full border-collapse bg-leaf text-left', className)}>
         {children}
       </table>

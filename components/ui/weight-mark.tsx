@@ -7,7 +7,7 @@ const COLOURS: Record<Weight, string> = { blocks: 'text-umber', distorts: 'text-
 export function WeightMark({ weight, bare = false }: { weight: Weight; bare?: boolean }) {
   return (
     <span
-      className={classes('inline-flex items-center gap-1 font-semibold whitespace-nowrap', COLOURS[weight])}
+      className={classes('inline-flex items-baseline gap-1 font-semibold whitespace-nowrap', COLOURS[weight])}
       title={`${weight}: ${WEIGHTS[weight]}`}
     >
       <WeightSquare weight={weight} />
@@ -19,7 +19,7 @@ export function WeightMark({ weight, bare = false }: { weight: Weight; bare?: bo
 /** The shape alone, in the current colour; always beside its word. */
 export function WeightSquare({ weight }: { weight: Weight }) {
   return (
-    <svg viewBox="0 0 10 10" width="10" height="10" aria-hidden="true" className="shrink-0">
+    <svg viewBox="0 0 10 10" width="10" height="10" aria-hidden="true" className="relative top-px shrink-0">
       <rect x="0.75" y="0.75" width="8.5" height="8.5" fill="none" stroke="currentColor" strokeWidth="1.5" />
       {weight !== 'query' && (
         <rect x="0" y="0" width={weight === 'blocks' ? 10 : 5} height="10" fill="currentColor" />

@@ -3,7 +3,8 @@
  * office's own.
  */
 const MINUS = '−';
-const NARROW_SPACE = '\u202f';
+/** Keeps a number and its unit on one line. */
+const NBSP = '\u00a0';
 export const DEFAULT_LOCALE = 'en-GB';
 
 /** A calendar date YYYY-MM-DD, never ambiguous: 12 Mar 2027. */
@@ -44,12 +45,12 @@ export function formatCount(value: number, locale: string = DEFAULT_LOCALE): str
 
 /** A duration in working days: 118.0 d. */
 export function formatDays(days: number, locale: string = DEFAULT_LOCALE, decimals = 1): string {
-  return `${formatNumber(days, decimals, locale)}${NARROW_SPACE}d`;
+  return `${formatNumber(days, decimals, locale)}${NBSP}d`;
 }
 
 /** A variance in working days squared: 24.83 d². */
 export function formatVariance(variance: number, locale: string = DEFAULT_LOCALE): string {
-  return `${formatNumber(variance, 2, locale)}${NARROW_SPACE}d²`;
+  return `${formatNumber(variance, 2, locale)}${NBSP}d²`;
 }
 
 /** A difference with its sign: +5.6, −1.9, 0.0. */
@@ -61,22 +62,22 @@ export function formatSigned(value: number, decimals: number, locale: string = D
 
 /** A difference of durations: +5.6 d. */
 export function formatDayDifference(days: number, locale: string = DEFAULT_LOCALE): string {
-  return `${formatSigned(days, 1, locale)}${NARROW_SPACE}d`;
+  return `${formatSigned(days, 1, locale)}${NBSP}d`;
 }
 
 /** A probability as a whole per cent; only what is certain is written 0 % or 100 %. */
 export function formatPercent(probability: number, locale: string = DEFAULT_LOCALE): string {
   const percent = probability * 100;
-  if (percent > 0 && percent < 1) return `under${NARROW_SPACE}1${NARROW_SPACE}%`;
-  if (percent < 100 && percent > 99) return `over${NARROW_SPACE}99${NARROW_SPACE}%`;
-  return `${formatNumber(percent, 0, locale)}${NARROW_SPACE}%`;
+  if (percent > 0 && percent < 1) return `under${NBSP}1${NBSP}%`;
+  if (percent < 100 && percent > 99) return `over${NBSP}99${NBSP}%`;
+  return `${formatNumber(percent, 0, locale)}${NBSP}%`;
 }
 
 /** The size of a file: 640 B, 84 kB, 3.2 MB (decimal units). */
 export function formatBytes(bytes: number, locale: string = DEFAULT_LOCALE): string {
-  if (bytes < 1000) return `${formatNumber(bytes, 0, locale)}${NARROW_SPACE}B`;
-  if (bytes < 999_500) return `${formatNumber(bytes / 1000, 0, locale)}${NARROW_SPACE}kB`;
-  return `${formatNumber(bytes / 1_000_000, 1, locale)}${NARROW_SPACE}MB`;
+  if (bytes < 1000) return `${formatNumber(bytes, 0, locale)}${NBSP}B`;
+  if (bytes < 999_500) return `${formatNumber(bytes / 1000, 0, locale)}${NBSP}kB`;
+  return `${formatNumber(bytes / 1_000_000, 1, locale)}${NBSP}MB`;
 }
 
 /** `1 finding`, `3 findings`. */

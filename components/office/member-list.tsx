@@ -4,7 +4,6 @@ import { useState } from 'react';
 import { useOfficeView } from '@/components/shell/office-context';
 import { Button } from '@/components/ui/button';
 import { Dialog } from '@/components/ui/dialog';
-import { Table, Td, Th } from '@/components/ui/table';
 import { toast } from '@/components/ui/toast';
 import { sentenceOf } from '@/lib/client/error';
 import { useInviteMember, useUpdateMember } from '@/lib/client/members';
@@ -15,98 +14,84 @@ interface Props {
   onInvited: (invitation: InvitationView) => void;
 }
 
-export function MemberTable({ members, onInvited }: Props) {
+export function MemberList({ members, onInvited }: Props) {
   const [leaving, setLeaving] = useState<MemberView | null>(null);
   return (
     <>
-      <Table label="People" className="border border-hair">
-        <thead>
-          <tr>
-            <Th>Person</Th>
-            <Th>Role</Th>
-            <Th>State</Th>
-            <Th>
-              <span className="sr-only">What can be done</span>
-            </Th>
-          </tr>
-        </thead>
-        <tbody>
-          {members.map((member) => (
-            <MemberRow
-              key={member.id}
-              member={member}
-              onInvited={onInvited}
-              onLeaving={() => setLeaving(member)}
-            />
-          ))}
-        </tbody>
-      </Table>
+      <ul className="border border-hair bg-leaf">
+        {members.map((member) => (
+          <MemberRow
+            key={member.id}
+            member={member}
+            onInvited={onInvited}
+            onLeaving={() => setLeaving(member)}
+          />
+        ))}
+      </ul>
       {leaving && <LeavingDialog member={leaving} onClose={() => setLeaving(null)} />}
     </>
   );
 }
 
-function MemberRow({
-  member,
-  onInvited,
-  onLeaving,
-}: {
+interface RowProps {
   member: MemberView;
   onInvited: Props['onInvited'];
   onLeaving: () => void;
-}) {
+}
+
+function MemberRow({ member, onInvited, onLeaving }: RowProps) {
+  const { me } = useOfficeView();
+  return (
+    <li className="grid items-start gap-x-6 gap-y-1 border-b border-hair p-3 last:border-0 sm:grid-cols-[minmax(0,1fr)_minmax(0,1fr)_auto]">
+      <div className="min-w-0">
+        <span className="font-semibold">{member.name}</span>
+        {member.email === me.email && <span className="text-slate"> (you)</span>}
+        <span className="block wrap-anywhere text-slate">{member.email}</span>
+      </div>
+      <div>
+        {member.role}
+        {member.contractor && `, ${member.contractor.name}`}
+        <span className="block text-slate">{stateOf(member)}</span>
+      </div>
+      <MemberActions member={member} onInvited={onInvited} onLeaving={onLeaving} />
+    </li>
+  );
+}
+
+function MemberActions({ member, onInvited, onLeaving }: RowProps) {
   const { slug, me } = useOfficeView();
   const invite = useInviteMember(slug);
   const update = useUpdateMember(slug);
   const fail = (error: unknown) => toast({ text: sentenceOf(error), tone: 'trouble' });
-  const own = member.email === me.email;
+  if (member.disabled) {
+    return (
+      <Button
+        variant="quiet"
+        className="justify-self-start max-sm:-ml-3"
+        busy={update.isPending}
+        aria-label={`Let in again: ${member.name}`}
+        onClick={() => update.mutate({ member: member.id, disabled: false }, { onError: fail })}
+      >
+        Let in again
+      </Button>
+    );
+  }
   return (
-    <tr>
-      <Td>
-        <span className="font-semibold">{member.name}</span>
-        {own && <span className="text-slate"> (you)</span>}
-        <span className="block break-all text-slate">{member.email}</span>
-      </Td>
-      <Td>
-        {member.role}
-        {member.contractor && <span className="block text-slate">{member.contractor.name}</span>}
-      </Td>
-      <Td>{stateOf(member)}</Td>
-      <Td>
-        <div className="flex flex-wrap justify-end gap-1">
-          {member.disabled ? (
-            <Button
-              variant="quiet"
-              busy={update.isPending}
-              aria-label={`Let ${member.name} in again`}
-              onClick={() => update.mutate({ member: member.id, disabled: false }, { onError: fail })}
-            >
-              Let in again
-            </Button>
-          ) : (
-            <>
-              <Button
-                variant="quiet"
-                busy={invite.isPending}
-                aria-label={`New link for ${member.name}`}
-                onClick={() => invite.mutate(member.id, { onSuccess: onInvited, onError: fail })}
-              >
-                New link
-              </Button>
-              {!own && (
-                <Button
-                  variant="quiet"
-                  aria-label={`Take away the access of ${member.name}`}
-                  onClick={onLeaving}
-                >
-                  Take away
-                </Button>
-              )}
-            </>
-          )}
-        </div>
-      </Td>
-    </tr>
+    <div className="flex flex-wrap gap-1 max-sm:-ml-3">
+      <Button
+        variant="quiet"
+        busy={invite.isPending}
+        aria-label={`New link for ${member.name}`}
+        onClick={() => invite.mutate(member.id, { onSuccess: onInvited, onError: fail })}
+      >
+        New link
+      </Button>
+      {member.email !== me.email && (
+        <Button variant="quiet" aria-label={`Take away the access of ${member.name}`} onClick={onLeaving}>
+          Take away
+        </Button>
+      )}
+    </div>
   );
 }
 
