@@ -7,17 +7,19 @@ import { removeLinks, writtenIn } from '../support/link-edits';
 import { GAO_LOGIC } from '../support/sources';
 import { amount, called, capital } from '../support/words';
 
-/** Links of one pair and relation, written in one way (a list may say each link from both its ends). */
-function alike(list: ActivityList): number[][] {
+/** Links into one activity by predecessor and relation, where several are alike and written in one way. */
+function alike(list: ActivityList, into: readonly number[]): number[][] {
+  if (into.length < 2) return [];
   const groups = new Map<string, number[]>();
-  list.links.forEach((link, index) => {
-    const { fromIndex, toIndex, type, linkCell } = link;
-    if (fromIndex < 0 || toIndex < 0 || fromIndex === toIndex) return;
-    const key = `${fromIndex} ${toIndex} ${type} ${list.linkCells[linkCell]?.gives}`;
+  for (const index of into) {
+    const link = list.links[index];
+    if (!link || link.fromIndex < 0 || link.fromIndex === link.toIndex) continue;
+    // A list may say each link from both its ends.
+    const key = `${link.fromIndex} ${link.type} ${list.linkCells[link.linkCell]?.gives}`;
     const group = groups.get(key);
     if (group) group.push(index);
     else groups.set(key, [index]);
-  });
+  }
   return [...groups.values()].filter(({ length }) => length > 1);
 }
 
@@ -42,36 +44,38 @@ export const rule: Rule = {
     },
   },
   limits: {},
-  check({ list }) {
-    return alike(list).flatMap((group) => {
-      const kept = list.links[binding(list.links, group)];
-      return group.flatMap((index) => {
-        const link = list.links[index];
-        const { cell } = writtenIn(list, link);
-        const [from, to] = [list.activities[link?.fromIndex ?? -1], list.activities[link?.toIndex ?? -1]];
-        const owner = cell && list.activities[cell.owner];
-        if (!link || !kept || link === kept || !from || !to || !owner) return [];
-        const same = link.lag === kept.lag;
-        const reason = same
-          ? 'The two say the same, so the later one is removed.'
-          : `The link ${lagWords(kept.lag)} binds, so the other is removed.`;
-        return [
-          {
-            about: `${from.id}|${to.id}|${link.type}`,
-            message: same ? 'same' : 'lags',
-            data: {
-              from: called(from),
-              to: called(to),
-              relation: RELATION_NAMES[link.type],
-              kept: lagWords(kept.lag),
-              removed: lagWords(link.lag),
+  check({ list, linksInto }) {
+    return linksInto
+      .flatMap((into) => alike(list, into))
+      .flatMap((group) => {
+        const kept = list.links[binding(list.links, group)];
+        return group.flatMap((index) => {
+          const link = list.links[index];
+          const { cell } = writtenIn(list, link);
+          const [from, to] = [list.activities[link?.fromIndex ?? -1], list.activities[link?.toIndex ?? -1]];
+          const owner = cell && list.activities[cell.owner];
+          if (!link || !kept || link === kept || !from || !to || !owner) return [];
+          const same = link.lag === kept.lag;
+          const reason = same
+            ? 'The two say the same, so the later one is removed.'
+            : `The link ${lagWords(kept.lag)} binds, so the other is removed.`;
+          return [
+            {
+              about: `${from.id}|${to.id}|${link.type}`,
+              message: same ? 'same' : 'lags',
+              data: {
+                from: called(from),
+                to: called(to),
+                relation: RELATION_NAMES[link.type],
+                kept: lagWords(kept.lag),
+                removed: lagWords(link.lag),
+              },
+              ...at(owner, cell.cell),
+              fix: removeLinks(list, [index], reason),
             },
-            ...at(owner, cell.cell),
-            fix: removeLinks(list, [index], reason),
-          },
-        ];
+          ];
+        });
       });
-    });
   },
 };
 

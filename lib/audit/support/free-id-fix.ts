@@ -26,16 +26,20 @@ function contentOf(list: ActivityList, activity: Activity, id: string): CellCont
   return numeric ? Number(id) : id;
 }
 
-function reasonFor(list: ActivityList, { id, after, awaitedBy }: FreeId): string {
-  const owners = awaitedBy.flatMap((index) => {
+function placeOf({ id, after, before }: FreeId): string {
+  if (after === null) return `${id} is free.`;
+  if (before !== null) return `${id} is free, and lies between ${after} and ${before}.`;
+  return `${id} is free, and follows ${after} in the list's pattern.`;
+}
+
+function reasonFor(list: ActivityList, free: FreeId): string {
+  const owners = free.awaitedBy.flatMap((index) => {
     const cell = list.linkCells[list.links[index]?.linkCell ?? -1];
     const owner = cell && list.activities[cell.owner];
     return owner ? [called(owner)] : [];
   });
-  const place =
-    after === null ? `${id} is free.` : `${id} is free, and follows ${after} in the list's pattern.`;
-  if (owners.length === 0) return place;
-  return `${place} The links of ${joined([...new Set(owners)])} name it already.`;
+  if (owners.length === 0) return placeOf(free);
+  return `${placeOf(free)} The links of ${joined([...new Set(owners)])} name it already.`;
 }
 
 /** Gives a row a free ID; nothing where it has no cell for one. */

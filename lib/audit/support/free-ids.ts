@@ -1,7 +1,7 @@
 import type { Activity } from '@/lib/schedule/activity';
 import type { ActivityList } from '@/lib/schedule/activity-list';
 import { canBeNamed } from './about';
-import { memberOf, type Series, seriesOf } from './id-pattern';
+import { type Member, memberOf, type Series, seriesOf } from './id-pattern';
 import { memo } from './memo';
 
 /** A free ID for a row that has none of its own. */
@@ -9,6 +9,8 @@ export interface FreeId {
   readonly id: string;
   /** The ID it follows in the list's pattern; null where it begins one. */
   readonly after: string | null;
+  /** The ID of the row below, where it lies between the two. */
+  readonly before: string | null;
   /** Links that name this ID already, by index into the list's links: they mean this row, it seems. */
   readonly awaitedBy: readonly number[];
 }
@@ -44,18 +46,38 @@ function neighbour({ list, proposed }: State, activity: Activity, direction: 1 |
   return proposed.get(next.index)?.id ?? (next.id === '' ? null : next.id);
 }
 
+/** Numbers between two neighbours that are looked at one by one. */
+const SEARCHED = 50;
+
+/** One that a link names already; else a step further; else halfway to the row below. */
+function numbersBetween(
+  above: Member,
+  below: Member | null,
+  step: number,
+  isAwaited: (n: number) => boolean,
+) {
+  const next = above.number + step;
+  if (!below || below.series !== above.series) return [next];
+  const end = Math.min(below.number, above.number + SEARCHED);
+  const awaited: number[] = [];
+  for (let n = above.number + 1; n < end; n++) if (isAwaited(n)) awaited.push(n);
+  const halfway = Math.floor((above.number + below.number) / 2);
+  return [...awaited, next, halfway].filter((n) => n > above.number && n < below.number);
+}
+
 /** The ID that is missing between the rows above and below: A4, –, A6 → A5. */
 function gapId(state: State, activity: Activity): FreeId | null {
-  const above = neighbour(state, activity, -1);
-  const member = above === null ? null : memberOf(above);
-  const series = member && state.series.get(member.series);
-  if (!member || !series) return null;
-  const number = member.number + series.step;
-  const below = memberOf(neighbour(state, activity, 1) ?? '');
-  const fits = !below || below.series !== member.series || below.number > number;
-  const id = series.write(number, series.width);
-  if (!fits || state.taken.has(id)) return null;
-  return { id, after: above, awaitedBy: state.awaited.get(id) ?? [] };
+  const [after, before] = [neighbour(state, activity, -1), neighbour(state, activity, 1)];
+  const above = after === null ? null : memberOf(after);
+  const series = above && state.series.get(above.series);
+  if (!above || !series) return null;
+  const below = before === null ? null : memberOf(before);
+  const write = (number: number) => series.write(number, series.width);
+  const numbers = numbersBetween(above, below, series.step, (number) => state.awaited.has(write(number)));
+  const id = numbers.map(write).find((candidate) => !state.taken.has(candidate));
+  if (id === undefined) return null;
+  const between = below?.series === above.series ? before : null;
+  return { id, after, before: between, awaitedBy: state.awaited.get(id) ?? [] };
 }
 
 /** The ID after the last of a series; one that a link names already is left alone. */
@@ -68,7 +90,7 @@ function nextId(state: State, series: Series): FreeId {
     id = series.write(number, series.width);
   } while (state.taken.has(id) || state.awaited.has(id));
   series.last = number;
-  return { id, after, awaitedBy: [] };
+  return { id, after, before: null, awaitedBy: [] };
 }
 
 const NEW_SERIES: Series = { last: 0, step: 1, width: 0, size: 0, write: String };
@@ -95,7 +117,7 @@ function suffixed(state: State, id: string): FreeId {
   let number = (state.suffixes.get(id) ?? 1) + 1;
   while (state.taken.has(`${id}-${number}`) || state.awaited.has(`${id}-${number}`)) number += 1;
   state.suffixes.set(id, number);
-  return { id: `${id}-${number}`, after: id, awaitedBy: [] };
+  return { id: `${id}-${number}`, after: id, before: null, awaitedBy: [] };
 }
 
 function propose(state: State, activity: Activity): FreeId {
