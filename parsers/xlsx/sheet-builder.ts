@@ -4,7 +4,7 @@ import { columnLetters } from '@/lib/schedule/cell';
 import { type CellValue, ErrorValue, type SheetFormula, type SheetRow } from '@/lib/schedule/sheet';
 import { shiftFormula } from './formula';
 import type { NumberFormats } from './number-formats';
-import { isoToSerial } from './serial-date';
+import { isoToSerial } from '@/parsers/cells/serial-date';
 
 /** What the sheets of a workbook share. */
 export interface WorkbookContext {
