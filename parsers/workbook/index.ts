@@ -1,5 +1,5 @@
 import { readSheets } from '@/parsers';
-import { readDialect } from '@/parsers/csv';
+import { type Dialect, readDialect } from '@/parsers/csv';
 import { changedCells } from './changed-cells';
 import { checkFile } from './check';
 import { patchCsv } from './csv';
@@ -9,8 +9,9 @@ import { patchXlsx } from './xlsx';
 export { changesCsv } from './csv';
 export type { Check, GiveBackInput, GivenBack, ListedChange } from './types';
 
+const WORKBOOK_TYPE = 'application/vnd.openxmlformats-officedocument.spreadsheetml.sheet';
 const WORKBOOK_TYPES: Readonly<Record<string, string>> = {
-  xlsx: 'application/vnd.openxmlformats-officedocument.spreadsheetml.sheet',
+  xlsx: WORKBOOK_TYPE,
   xlsm: 'application/vnd.ms-excel.sheet.macroEnabled.12',
   xltx: 'application/vnd.openxmlformats-officedocument.spreadsheetml.template',
   xltm: 'application/vnd.ms-excel.template.macroEnabled.12',
@@ -18,9 +19,10 @@ const WORKBOOK_TYPES: Readonly<Record<string, string>> = {
 
 const isZip = (bytes: Uint8Array) => bytes[0] === 0x50 && bytes[1] === 0x4b;
 
-function contentType(bytes: Uint8Array, ending: string): string {
-  if (isZip(bytes)) return WORKBOOK_TYPES[ending] ?? WORKBOOK_TYPES.xlsx ?? '';
-  return `text/csv; charset=${readDialect(bytes).dialect.encoding}`;
+function contentType(fileName: string, dialect: Dialect | null): string {
+  if (dialect) return `text/csv; charset=${dialect.encoding}`;
+  const ending = /\.(\w+)$/.exec(fileName)?.[1]?.toLowerCase() ?? 'xlsx';
+  return WORKBOOK_TYPES[ending] ?? WORKBOOK_TYPE;
 }
 
 /** `schedule.xlsx` → `schedule (corrected).xlsx`. */
@@ -39,18 +41,22 @@ export function giveBack(input: GiveBackInput): GivenBack {
   const { bytes, fileName, corrections } = input;
   const received = input.sheets ?? readSheets(bytes, fileName);
   const cells = changedCells(received, corrections);
-  const patched = patch(input, cells);
+  const dialect = isZip(bytes) ? null : readDialect(bytes).dialect;
+  const patched = patch(input, cells, dialect);
   const again = patched.bytes === bytes ? received : readSheets(patched.bytes, fileName);
-  const ending = /\.(\w+)$/.exec(fileName)?.[1]?.toLowerCase() ?? '';
   return {
     bytes: patched.bytes,
     fileName: correctedName(fileName),
-    contentType: contentType(bytes, ending),
+    contentType: contentType(fileName, dialect),
     check: checkFile(received, corrections, again, patched),
   };
 }
 
-function patch({ bytes, changes }: GiveBackInput, cells: readonly ChangedCell[]): Patched {
+function patch(
+  { bytes, changes }: GiveBackInput,
+  cells: readonly ChangedCell[],
+  dialect: Dialect | null,
+): Patched {
   if (cells.length === 0) return { bytes, remarks: [], refused: [] };
-  return isZip(bytes) ? patchXlsx(bytes, cells, changes) : patchCsv(bytes, cells);
+  return dialect ? patchCsv(bytes, dialect, cells) : patchXlsx(bytes, cells, changes);
 }

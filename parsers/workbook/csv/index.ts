@@ -1,5 +1,5 @@
 import type { CellContent } from '@/lib/schedule/sheet';
-import { type Dialect, FieldCursor, readDialect } from '@/parsers/csv';
+import { type Dialect, FieldCursor } from '@/parsers/csv';
 import { CHANGE_HEADINGS, changeRow } from '../changes';
 import type { ChangedCell, ListedChange, Patched } from '../types';
 import { startsLikeFormula } from '../formula-start';
@@ -111,8 +111,7 @@ function furtherRecords(
 const MARKS = { 'utf-8': 3, 'utf-16le': 2, 'utf-16be': 2, 'windows-1252': 0 } as const;
 
 /** Changes fields of a delimiter-separated file where they stand; every other byte of it stays as it is. */
-export function patchCsv(bytes: Uint8Array, cells: readonly ChangedCell[]): Patched {
-  const { dialect } = readDialect(bytes);
+export function patchCsv(bytes: Uint8Array, dialect: Dialect, cells: readonly ChangedCell[]): Patched {
   const { encoding, delimiter } = dialect;
   const refuse = ({ sheet, cell }: ChangedCell, reason: string) => ({ sheet, cell, reason });
   if (delimiter.charCodeAt(0) > 127) {

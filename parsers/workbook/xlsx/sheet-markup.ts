@@ -60,8 +60,12 @@ export function rowsOf({ structure, prefix, data }: SheetMarkup): RowSpot[] {
   let number = 0;
   let start = findTag(structure, open, data.inner, data.innerEnd);
   while (start >= 0) {
-    const end = tagEnd(structure, start);
-    number = Number(attribute(structure.slice(start, end), 'r') ?? number + 1);
+    // Nearly every writer puts the number first.
+    const first = structure.startsWith(' r="', start + open.length) ? start + open.length + 4 : -1;
+    const quote = first < 0 ? -1 : structure.indexOf('"', first);
+    const end = quote < 0 ? tagEnd(structure, start) : quote;
+    const told = quote < 0 ? attribute(structure.slice(start, end), 'r') : structure.slice(first, quote);
+    number = Number(told ?? number + 1);
     rows.push({ number, start });
     start = findTag(structure, open, end, data.innerEnd);
   }
