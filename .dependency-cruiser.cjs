@@ -73,7 +73,7 @@ module.exports = {
     // Hygiene.
     never('no-circular', {}, { circular: true, viaOnly: { dependencyTypesNot: ['type-only'] } }),
     never('no-unresolvable', {}, { couldNotResolve: true }),
-    never('no-test-in-product', { pathNot: '^tests/' }, { path: '^tests/' }),
+    never('no-test-in-product', { pathNot: '^(tests|lib/commands)/' }, { path: '^tests/' }),
     never(
       'no-dev-package-in-product',
       { path: '^(app|components|db|lib|parsers)/', pathNot: '^lib/commands/' },

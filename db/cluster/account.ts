@@ -45,3 +45,9 @@ export function commandAs(account: Account | null, program: string, args: readon
     spawnSync('setpriv', [...options, '--', 'true'], { cwd: '/', stdio: 'ignore' }).status === 0;
   return supported ? ['setpriv', ...options, '--', program, ...args] : [program, ...args];
 }
+
+/** What the server's programs are given of our environment: nothing that would set an option of theirs. */
+export function bareEnvironment(): NodeJS.ProcessEnv {
+  const { PATH, NODE_ENV } = process.env;
+  return { PATH, NODE_ENV, LC_ALL: 'C' };
+}

@@ -2,7 +2,7 @@ import { execFile } from 'node:child_process';
 import { chown, readFile, rm, writeFile } from 'node:fs/promises';
 import { join } from 'node:path';
 import { promisify } from 'node:util';
-import { type Account, as } from './account';
+import { type Account, as, bareEnvironment } from './account';
 import { OLDEST_MAJOR, type Programs } from './programs';
 import { Refusal } from './refusal';
 
@@ -36,12 +36,13 @@ export function fittingPrograms(found: readonly Programs[], version: number | nu
   );
 }
 
-/** Makes a cluster in `folder/data`; it accepts the owner, with the password, over loopback only. */
+/** Makes a cluster in `folder/data`; it accepts the owner, with the password, over loopback only. `throwAway`: not written to the disk for sure. */
 export async function createCluster(
   programs: Programs,
   folder: string,
   account: Account | null,
   password: string,
+  throwAway: boolean,
 ): Promise<void> {
   const passwordFile = join(folder, 'password');
   const data = join(folder, 'data');
@@ -56,12 +57,13 @@ export async function createCluster(
       `--pwfile=${passwordFile}`,
       '--auth=scram-sha-256',
       '--encoding=UTF8',
+      ...(throwAway ? ['--no-sync'] : []),
     ];
     const init = (locale: string) =>
       run(join(programs.folder, 'initdb'), [...args, `--locale=${locale}`, '--lc-messages=C'], {
         ...as(account),
         cwd: folder,
-        env: { PATH: process.env.PATH, LC_ALL: 'C' },
+        env: bareEnvironment(),
       });
     await init('C.UTF-8').catch(async (error: Error) => {
       if (!/locale/i.test(error.message)) throw error;

@@ -5,7 +5,7 @@ import { createServer } from 'node:net';
 import { join } from 'node:path';
 import { setTimeout as sleep } from 'node:timers/promises';
 import { Client } from 'pg';
-import { type Account, commandAs } from './account';
+import { type Account, bareEnvironment, commandAs } from './account';
 import { OWNER } from './create';
 import type { Programs } from './programs';
 import { Refusal } from './refusal';
@@ -68,7 +68,7 @@ async function launch(options: ServerOptions, port: number): Promise<ChildProces
       cwd: options.data,
       detached: true,
       stdio: ['ignore', log.fd, log.fd],
-      env: { PATH: process.env.PATH, LC_ALL: 'C' },
+      env: bareEnvironment(),
       ...(program === postgres && options.account
         ? { uid: options.account.uid, gid: options.account.gid }
         : {}),

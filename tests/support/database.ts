@@ -1,8 +1,11 @@
 import { randomBytes } from 'node:crypto';
-import { Client, type QueryResultRow } from 'pg';
+import type { QueryResultRow } from 'pg';
 import { afterAll, beforeAll } from 'vitest';
 import { closeDatabase } from '@/db/client';
 import { TEMPLATE } from './cluster-setup';
+import { query } from './query';
+
+export { query } from './query';
 
 export interface TestDatabase {
   /** Valid from `beforeAll` on. */
@@ -49,21 +52,6 @@ export async function emptyDatabase(): Promise<{ url: string; drop: () => Promis
     url: within(name, process.env.PLUMBROW_TEST_OWNER_URL),
     drop: () => administer(`drop database ${name} with (force)`),
   };
-}
-
-/** One statement over a connection of its own. */
-export async function query<Row extends QueryResultRow>(
-  url: string,
-  text: string,
-  values: readonly unknown[] = [],
-): Promise<Row[]> {
-  const client = new Client({ connectionString: url });
-  await client.connect();
-  try {
-    return (await client.query<Row>(text, [...values])).rows;
-  } finally {
-    await client.end();
-  }
 }
 
 async function administer(text: string): Promise<void> {
