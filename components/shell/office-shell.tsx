@@ -1,5 +1,6 @@
 'use client';
 
+import Link from 'next/link';
 import type { ReactNode } from 'react';
 import { ErrorState, Loading } from '@/components/ui/states';
 import { useOffice } from '@/lib/client/office';
@@ -21,7 +22,7 @@ export function OfficeShell({ slug, children }: { slug: string; children: ReactN
           {office.error ? (
             <ErrorState error={office.error} retry={() => void office.refetch()}>
               <p className="mt-2">
-                <a href="/">Go to your own office</a>
+                <Link href="/">Go to your own office</Link>
               </p>
             </ErrorState>
           ) : (

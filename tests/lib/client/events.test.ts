@@ -20,13 +20,13 @@ describe('an event', () => {
   });
 });
 
-it('tells what someone did without naming them twice', () => {
+it('tells what someone did as a sentence about them', () => {
   const entry = { sequence: 4, at: '2027-03-09T10:12:00.000Z', by: 'Piet Ostra', verb: 'adopt', hash: 'ab' };
-  expect(newsSentence({ ...entry, summary: 'Adopted 3 fixes.' })).toBe(
-    'Piet Ostra: Adopted 3 fixes. What you see is new.',
+  expect(newsSentence({ ...entry, summary: 'Adopted 3 fixes in 4 cells.' })).toBe(
+    'Piet Ostra adopted 3 fixes in 4 cells. What you see is new.',
   );
-  expect(newsSentence({ ...entry, summary: 'Piet Ostra adopted 3 fixes' })).toBe(
-    'Piet Ostra adopted 3 fixes. What you see is new.',
+  expect(newsSentence({ ...entry, summary: 'Rev 2 came in and supersedes this one.' })).toBe(
+    'Piet Ostra: Rev 2 came in and supersedes this one. What you see is new.',
   );
 });
 
