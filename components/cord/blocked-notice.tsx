@@ -51,7 +51,7 @@ function BlockingList({
   return (
     <ul className="mt-1">
       {findings.slice(0, NAMED).map((finding) => (
-        <li key={finding.id} className="flex gap-2">
+        <li key={finding.id} className="flex items-baseline gap-2">
           <WeightMark weight="blocks" bare />
           <span>
             <Link href={`${base}?finding=${finding.id}`}>{finding.title}</Link>: {finding.message}

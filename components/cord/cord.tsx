@@ -2,6 +2,7 @@
 
 import Link from 'next/link';
 import { usePathname } from 'next/navigation';
+import { useEffect, useRef } from 'react';
 import type { SubmissionView } from '@/lib/contract/submission';
 import { classes } from '@/components/ui/classes';
 import { useFormat } from '@/components/ui/locale';
@@ -23,10 +24,13 @@ interface CordProps {
 export function Cord({ office, submission, view }: CordProps) {
   const { locale } = useFormat();
   const here = stopAt(usePathname());
+  const nav = useRef<HTMLElement>(null);
+  useEffect(() => showPresent(nav.current), [here]);
   return (
     <nav
+      ref={nav}
       aria-label="Places of this submission"
-      className="relative max-lg:overflow-x-auto max-lg:border-b max-lg:border-hair lg:w-36 lg:shrink-0 lg:pl-6 print:hidden"
+      className="relative [scrollbar-width:none] max-lg:overflow-x-auto max-lg:border-b max-lg:border-hair lg:w-33 lg:shrink-0 lg:pl-6 print:hidden"
     >
       <PlumbLine at={STOPS.indexOf(here)} />
       <ol className="relative flex w-max min-w-full px-4 sm:px-6 lg:block lg:w-auto lg:min-w-0 lg:px-0 lg:pt-7 lg:pl-7">
@@ -35,7 +39,7 @@ export function Cord({ office, submission, view }: CordProps) {
             <Link
               href={stopPath(office, submission, stop)}
               aria-current={stop === here ? 'page' : undefined}
-              className="group relative block min-h-11 py-1 pr-6 no-underline max-lg:pt-6 lg:pr-0"
+              className="group relative block min-h-11 py-1 pr-5 no-underline max-lg:pt-6 lg:pr-0"
             >
               <LyingKnot here={stop === here} first={stop === STOPS[0]} />
               <span
@@ -55,6 +59,16 @@ export function Cord({ office, submission, view }: CordProps) {
       </ol>
     </nav>
   );
+}
+
+/** Where the cord lies along the top and is longer than the screen, the present place is brought into it. */
+function showPresent(nav: HTMLElement | null) {
+  const place = nav?.querySelector<HTMLElement>('[aria-current]')?.closest('li');
+  if (!nav || !place) return;
+  const { offsetLeft, offsetWidth } = place;
+  if (offsetLeft < nav.scrollLeft || offsetLeft + offsetWidth > nav.scrollLeft + nav.clientWidth) {
+    nav.scrollLeft = offsetLeft - (nav.clientWidth - offsetWidth) / 2;
+  }
 }
 
 /** The line from the masthead down to the bob is drawn in ink, what lies below it as a hair. */

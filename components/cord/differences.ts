@@ -14,7 +14,7 @@ export function finishLine(received: Figures, corrected: Figures, locale: string
 
 export function varianceLine(received: Figures, corrected: Figures, locale: string): string | null {
   return joined([
-    difference(received.variance, corrected.variance, (value) => `${formatSigned(value, 2, locale)}\u202fd²`),
+    difference(received.variance, corrected.variance, (value) => `${formatSigned(value, 2, locale)}\u00a0d²`),
     corrected.standardDeviation === null
       ? null
       : `deviation ${formatDays(corrected.standardDeviation, locale, 2)}`,

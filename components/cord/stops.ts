@@ -32,12 +32,12 @@ export function stopNote(stop: Stop, submission: SubmissionView, locale: string)
       return `${String(open.blocks + open.distorts + open.query)} open`;
     case 'path':
       return figures.corrected.expectedDuration === null
-        ? 'not computable'
+        ? 'blocked'
         : formatDays(figures.corrected.expectedDuration, locale);
     case 'confidence':
       if (project.targetFinish === null) return 'no target';
       return figures.corrected.chanceOfTarget === null
-        ? 'not computable'
+        ? 'blocked'
         : formatPercent(figures.corrected.chanceOfTarget, locale);
     case 'compare':
       return revision === 0 ? 'first revision' : `Rev ${String(revision - 1)} → ${String(revision)}`;

@@ -27,7 +27,7 @@ export function SubmissionFrame({ office, submission, children }: FrameProps) {
   return (
     <div className="flex min-w-0 flex-1 flex-col lg:flex-row">
       <Cord office={office} submission={submission} view={view ?? null} />
-      <main id="main" tabIndex={-1} className="min-w-0 flex-1 px-4 pt-5 pb-6 sm:px-6 lg:pl-4">
+      <main id="main" tabIndex={-1} className="min-w-0 flex-1 px-4 pt-5 pb-6 sm:px-6 lg:pl-0">
         {view && (
           <>
             <Crumbs
@@ -38,7 +38,7 @@ export function SubmissionFrame({ office, submission, children }: FrameProps) {
               ]}
             />
             <SubmissionHead office={office} view={view} />
-            {news && <NewsLine news={news} />}
+            <NewsLine news={news} />
             {children}
             <Caution />
           </>

@@ -37,7 +37,3 @@ export function remembering(measure: Measure): Measure {
 
 /** More lines than this are cut off in the grid; the bench shows the whole. */
 export const MOST_LINES = 3;
-
-export function rowHeight(lines: number, line: number, padding: number): number {
-  return Math.min(MOST_LINES, Math.max(1, lines)) * line + padding;
-}

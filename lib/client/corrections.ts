@@ -1,6 +1,6 @@
 'use client';
 
-import { useMutation, useQuery, useQueryClient, type QueryClient } from '@tanstack/react-query';
+import { queryOptions, useMutation, useQuery, useQueryClient, type QueryClient } from '@tanstack/react-query';
 import type { CorrectionResult, CorrectionView, SubmissionView } from '@/lib/contract/submission';
 import { ClientError } from './error';
 import { findingsKey, withAdopted, withFix, withResult, type Findings } from './findings';
@@ -24,15 +24,27 @@ export function correctionsKey(office: string, submission: string) {
   return keys.submissionPart(office, submission, 'corrections');
 }
 
-/** The corrections in force, for undoing one made before this page was opened. */
-export function useCorrections(office: string, submission: string, enabled: boolean) {
-  return useQuery({
+function correctionsQuery(office: string, submission: string) {
+  return queryOptions({
     queryKey: correctionsKey(office, submission),
     queryFn: ({ signal }) =>
       call<{ items: CorrectionView[] }>(submissionPath(office, submission, 'corrections'), { signal }),
+  });
+}
+
+/** The corrections in force: who made which, and when. */
+export function useCorrections(office: string, submission: string, enabled: boolean) {
+  return useQuery({
+    ...correctionsQuery(office, submission),
     select: (answer) => answer.items,
     enabled,
   });
+}
+
+/** The same, fetched anew for undoing one that was not made on this page. */
+export async function fetchCorrections(client: QueryClient, office: string, submission: string) {
+  const answer = await client.fetchQuery({ ...correctionsQuery(office, submission), staleTime: 0 });
+  return answer.items;
 }
 
 /** Steps run one after the other, each with the version the one before it left. */

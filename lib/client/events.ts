@@ -171,9 +171,9 @@ async function tellLatest(
   tell(latest ? newsSentence(latest) : 'Someone else changed this submission. What you see is new.');
 }
 
-/** "Piet Ostra: Adopted 3 fixes. What you see is new." */
+/** "Piet Ostra adopted 3 fixes. What you see is new.", from an entry whose sentence begins with its verb. */
 export function newsSentence(entry: RecordEntryView): string {
   const said = entry.summary.replace(/[.\s]+$/, '');
-  const named = said.startsWith(entry.by) ? said : `${entry.by}: ${said}`;
-  return `${named}. What you see is new.`;
+  const deed = /^Rev \d/.test(said) ? `: ${said}` : ` ${said.charAt(0).toLowerCase()}${said.slice(1)}`;
+  return `${entry.by}${deed}. What you see is new.`;
 }

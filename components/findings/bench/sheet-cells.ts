@@ -28,7 +28,7 @@ export function rowsToShow(finding: FindingView, edits: readonly CellEditView[])
   return [...rows].sort((x, y) => x - y);
 }
 
-/** ID and name, the columns with a marked cell, and what belongs together with those: all estimates, all of a link. */
+/** The name (else the ID), the columns with a marked cell, and what belongs together with those: all estimates, all of a link. */
 export function columnsToShow(
   columns: readonly SheetColumnView[],
   marked: ReadonlySet<string>,
@@ -36,10 +36,17 @@ export function columnsToShow(
   const indices = new Set([...marked].map((address) => parseAddress(address)?.column));
   const fields = columns.filter(({ index }) => indices.has(index)).map(({ field }) => field);
   const together = [ESTIMATES, LINKS].filter((group) => fields.some((field) => group.includes(field))).flat();
+  const naming = columns.some(({ field }) => field === 'name') ? 'name' : 'id';
   return columns.filter(
-    ({ index, field }) =>
-      field === 'id' || field === 'name' || indices.has(index) || together.includes(field),
+    ({ index, field }) => field === naming || indices.has(index) || together.includes(field),
   );
+}
+
+const SYMBOLS: Readonly<Record<string, string>> = { optimistic: 'a', likely: 'm', pessimistic: 'b' };
+
+/** What a column holds, as short as its heading must be. */
+export function columnHeading({ field, title }: SheetColumnView): string {
+  return SYMBOLS[field] ?? title;
 }
 
 /** What a cell shows: its content, or a change from one to another. */

@@ -29,8 +29,8 @@ const none: Figures = {
   standardDeviation: null,
   chanceOfTarget: null,
 };
-/** The narrow no-break spaces before units, as plain ones. */
-const plain = (text: string | null) => text?.replaceAll('\u202f', ' ') ?? null;
+/** The no-break spaces before units, as plain ones. */
+const plain = (text: string | null) => text?.replaceAll(/[\u00a0\u202f]/g, ' ') ?? null;
 
 describe('the differences under the head figures', () => {
   it('bear a sign and a unit', () => {

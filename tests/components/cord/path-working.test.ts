@@ -30,6 +30,7 @@ function analysis(expectedDuration: number): Extract<AnalysisView, { computable:
     computable: true,
     state: 'corrected',
     unit: 'working day',
+    calendar: { workingDays: [1, 2, 3, 4, 5], holidays: [] },
     start: '2027-01-04',
     finish: '2027-01-20',
     expectedDuration,

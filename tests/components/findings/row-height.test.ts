@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { linesOf, remembering, rowHeight } from '@/components/findings/row-height';
+import { linesOf, remembering } from '@/components/findings/row-height';
 
 /** A typeface in which every letter is 10 px wide. */
 const tenEach = (text: string) => text.length * 10;
@@ -44,8 +44,4 @@ it('measures each text once', () => {
   });
   expect([measure('pile'), measure('pile'), measure('cap')]).toEqual([4, 4, 3]);
   expect(asked).toBe(2);
-});
-
-it('holds the height between one line and three', () => {
-  expect([0, 1, 3, 9].map((lines) => rowHeight(lines, 20, 14))).toEqual([34, 34, 74, 74]);
 });

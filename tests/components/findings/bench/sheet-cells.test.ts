@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import {
   cellShown,
+  columnHeading,
   columnsToShow,
   columnTitle,
   currentText,
@@ -24,12 +25,14 @@ describe('which cells the bench shows', () => {
     expect(rowsToShow(finding(23, { row: null }), [])).toEqual([]);
   });
 
-  it('shows ID and name, and the estimates together', () => {
+  it('shows the name, what is marked, and the estimates together', () => {
     const titles = (marked: string[]) =>
       columnsToShow(piece.columns, new Set(marked)).map(({ field }) => field);
-    expect(titles(['G23'])).toEqual(['id', 'name', 'optimistic', 'likely', 'pessimistic']);
-    expect(titles(['J23'])).toEqual(['id', 'name', 'predecessors']);
-    expect(titles([])).toEqual(['id', 'name']);
+    expect(titles(['G23'])).toEqual(['name', 'optimistic', 'likely', 'pessimistic']);
+    expect(titles(['J23'])).toEqual(['name', 'predecessors']);
+    expect(titles(['A23'])).toEqual(['id', 'name']);
+    expect(columnsToShow(piece.columns.slice(0, 1), new Set()).map(({ field }) => field)).toEqual(['id']);
+    expect(piece.columns.slice(0, 3).map(columnHeading)).toEqual(['ID', 'Name', 'a']);
   });
 });
 

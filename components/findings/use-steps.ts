@@ -1,0 +1,127 @@
+'use client';
+
+import { useQueryClient } from '@tanstack/react-query';
+import { useRef, useState } from 'react';
+import { toast } from '@/components/ui/toast';
+import { fetchCorrections, useCorrect, useSetFix, type CorrectionStep } from '@/lib/client/corrections';
+import { ClientError } from '@/lib/client/error';
+import { adoptedFix } from '@/lib/client/findings';
+import type { CorrectionResult, FindingView, FixView } from '@/lib/contract/submission';
+import { useFormat } from '@/components/ui/locale';
+import { correctionOf, outcomeSentence, skippedSentence } from './outcome';
+
+/** What went wrong with a step, beside the finding it was for; null: with one that was for none. */
+export interface Trouble {
+  readonly finding: string | null;
+  readonly error: unknown;
+}
+
+/** The steps one can take on findings, what came of the last one, and the way back. */
+export function useSteps(office: string, submission: string) {
+  const client = useQueryClient();
+  const format = useFormat();
+  const correct = useCorrect(office, submission);
+  const setFix = useSetFix(office, submission);
+  const [trouble, setTrouble] = useState<Trouble | null>(null);
+  const [said, setSaid] = useState('');
+  /** Batches made on this page, the latest last. */
+  const made = useRef<string[]>([]);
+  const underWay = useRef(new Set<string>());
+
+  /** Runs a step unless the same is under way: a double click sends once. */
+  const run = async (
+    name: string,
+    finding: string | null,
+    send: () => Promise<CorrectionResult>,
+  ): Promise<CorrectionResult | null> => {
+    if (underWay.current.has(name)) return null;
+    underWay.current.add(name);
+    setTrouble(null);
+    try {
+      return await send();
+    } catch (error) {
+      setTrouble({ finding, error });
+      return null;
+    } finally {
+      underWay.current.delete(name);
+    }
+  };
+
+  const undo = async (batch: string, finding: string | null): Promise<boolean> => {
+    const result = await run(`undo ${batch}`, finding, () =>
+      correct.mutateAsync({ kind: 'undo', correction: batch }),
+    );
+    if (!result) return false;
+    made.current = made.current.filter((known) => known !== batch);
+    setSaid(outcomeSentence('Undone.', result, format));
+    return true;
+  };
+
+  const change = async (name: string, finding: string | null, step: CorrectionStep, done: string) => {
+    const result = await run(name, finding, () => correct.mutateAsync(step));
+    if (!result) return false;
+    if (result.batch) made.current.push(result.batch);
+    const sentence = outcomeSentence(done, result, format);
+    setSaid(sentence);
+    const { batch, items, skipped } = result;
+    if (skipped.length > 0) toast({ text: skippedSentence(result), tone: 'trouble' });
+    if (items.length > 1 && batch) {
+      toast({ text: sentence, action: { label: 'Undo all', run: () => void undo(batch, null) } });
+    }
+    return true;
+  };
+
+  return {
+    said,
+    trouble,
+    busy: correct.isPending || setFix.isPending,
+    forgetTrouble: () => setTrouble(null),
+    adopt: (finding: FindingView, fix: FixView) =>
+      change(`adopt ${fix.id}`, finding.id, { kind: 'adopt', fixes: [fix.id] }, 'Adopted.'),
+    adoptAll: (fixes: readonly string[]) =>
+      change(
+        'adopt all',
+        null,
+        { kind: 'adopt', fixes },
+        `${format.plural(fixes.length, 'fix', 'fixes')} adopted.`,
+      ),
+    edit: (finding: FindingView, edits: Extract<CorrectionStep, { kind: 'edit' }>['edits']) =>
+      change(
+        `edit ${finding.id}`,
+        finding.id,
+        { kind: 'edit', edits, finding: finding.id },
+        'Edited by hand.',
+      ),
+    setFixState: async (finding: FindingView, fix: FixView, state: 'declined' | 'proposed') => {
+      const result = await run(`${state} ${fix.id}`, finding.id, () =>
+        setFix.mutateAsync({ fix: fix.id, state }),
+      );
+      if (result) setSaid(state === 'declined' ? 'The fix is declined.' : 'The fix is proposed again.');
+      return result !== null;
+    },
+    /** Takes back what corrects a finding, whoever made it and whenever. */
+    undoFinding: async (finding: FindingView): Promise<void> => {
+      try {
+        const corrections = await fetchCorrections(client, office, submission);
+        const correction = correctionOf(corrections, finding, adoptedFix(finding));
+        if (correction) await undo(correction.id, finding.id);
+        else toast('There is no correction of this finding to undo.');
+      } catch (error) {
+        setTrouble({ finding: finding.id, error });
+      }
+    },
+    /** The last step made on this page; false where there is none. */
+    undoLast: async (): Promise<boolean> => {
+      const batch = made.current.at(-1);
+      if (batch === undefined) return false;
+      await undo(batch, null);
+      return true;
+    },
+  };
+}
+export type Steps = ReturnType<typeof useSteps>;
+
+/** Whether a step was refused because someone else changed the submission first. */
+export function wasStale(error: unknown): boolean {
+  return error instanceof ClientError && error.status === 409;
+}
