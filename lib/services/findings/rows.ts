@@ -27,7 +27,7 @@ export function draftFindings(state: ReadState): FindingDraft[] {
     sheet: finding.sheet,
     row: finding.row,
     cell: finding.cell,
-    fixes: fixesOf(finding).map((fix, rank) => draftFix(fix, rank, effects?.effect(fix.changes) ?? null)),
+    fixes: fixesOf(finding).map(([rank, fix]) => draftFix(fix, rank, effects?.effect(fix.changes) ?? null)),
   }));
   return asStored(drafts);
 }
@@ -37,9 +37,10 @@ function asStored<T>(value: T): T {
   return storable(JSON.parse(JSON.stringify(value)) as T);
 }
 
-/** The one proposed first, then the others. */
-function fixesOf({ fix, alternatives = [] }: Finding): readonly Fix[] {
-  return fix ? [fix, ...alternatives] : alternatives;
+/** With their ranks: 0 is the one proposed; where none is preferred, the alternatives begin at 1. */
+function fixesOf({ fix, alternatives = [] }: Finding): readonly (readonly [number, Fix])[] {
+  const others = alternatives.map((other, i) => [i + 1, other] as const);
+  return fix ? [[0, fix], ...others] : others;
 }
 
 function draftFix({ reason, edits }: Fix, rank: number, effect: Effect | null): FixDraft {
