@@ -11,6 +11,13 @@ export function detectedIn(error: unknown): IntakeView | null {
   return null;
 }
 
+/** A file that came last already is refused with the revision it is; null for any other refusal. */
+export function existingIn(error: unknown): { id: string; revision: number } | null {
+  if (!(error instanceof ClientError) || error.status !== 409) return null;
+  const { submission, revision } = error.body;
+  return typeof submission === 'string' && typeof revision === 'number' ? { id: submission, revision } : null;
+}
+
 function isIntake(value: unknown): boolean {
   if (typeof value !== 'object' || value === null) return false;
   return (

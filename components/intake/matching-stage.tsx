@@ -1,6 +1,8 @@
 'use client';
 
+import Link from 'next/link';
 import { useState } from 'react';
+import { useOfficeView } from '@/components/shell/office-context';
 import { Button } from '@/components/ui/button';
 import { useFormat } from '@/components/ui/locale';
 import { Panel } from '@/components/ui/panel';
@@ -69,6 +71,7 @@ export function MatchingStage({ stage, intake }: Props) {
 /** What stands in the way, what went wrong, and the button that hands the list in. */
 function Standing({ stage, intake }: Props) {
   const { file, view, draft, rereading, trouble } = stage;
+  const { slug } = useOfficeView();
   const missing = obstacles(draft);
   const problems = rereading ? [] : view.problems;
   const sentences = [...new Set([...missing, ...problems])];
@@ -76,7 +79,12 @@ function Standing({ stage, intake }: Props) {
     <div className="border border-l-4 border-hair border-l-cord bg-leaf p-4">
       {trouble && (
         <p role="alert" className="mb-3 border-l-4 border-umber py-1 pl-3 font-semibold">
-          {trouble.sentence}
+          {trouble.sentence}{' '}
+          {trouble.existing && (
+            <Link href={`/${slug}/submissions/${trouble.existing.id}`}>
+              Go to Rev {trouble.existing.revision}
+            </Link>
+          )}
         </p>
       )}
       {sentences.length > 0 ? (
@@ -104,11 +112,11 @@ function Standing({ stage, intake }: Props) {
           onClick={() =>
             void intake.send(file, view, draft, {
               straight: false,
-              ...(trouble?.same ? { again: true } : {}),
+              again: Boolean(trouble?.existing),
             })
           }
         >
-          {trouble?.same ? 'Hand it in all the same' : 'Hand it in'}
+          {trouble?.existing ? 'Hand it in all the same' : 'Hand it in'}
         </Button>
         <Button variant="quiet" onClick={intake.cancel}>
           Take another file

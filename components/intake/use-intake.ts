@@ -7,15 +7,15 @@ import { ClientError, sentenceOf } from '@/lib/client/error';
 import { detect, submit, type MatchingChoice } from '@/lib/client/intake';
 import { keys } from '@/lib/client/keys';
 import type { IntakeView } from '@/lib/contract/intake';
-import { detectedIn } from './detected';
+import { detectedIn, existingIn } from './detected';
 import { forget, handOver } from './handover';
 import { choiceOf, draftOf, readAs, type MatchingDraft } from './matching';
 import { noteReading } from './read-note';
 
 export interface Trouble {
   readonly sentence: string;
-  /** The same file is the latest revision already: it can be handed in all the same. */
-  readonly same: boolean;
+  /** The revision that this very file is already: it can be looked at, or handed in all the same. */
+  readonly existing: { readonly id: string; readonly revision: number } | null;
 }
 
 export type Stage =
@@ -156,7 +156,7 @@ export function useIntake(office: string, project: string) {
   }, []);
 
   const refuse = useCallback((sentence: string) => {
-    setStage({ at: 'choose', file: null, trouble: { sentence, same: false } });
+    setStage({ at: 'choose', file: null, trouble: { sentence, existing: null } });
   }, []);
 
   return { stage, take, change, send, cancel, refuse };
@@ -167,6 +167,6 @@ function troubleOf(error: unknown): Trouble {
   const sentences = [sentenceOf(error), ...errors.map(({ message }) => message)];
   return {
     sentence: [...new Set(sentences)].join(' '),
-    same: error instanceof ClientError && error.status === 409,
+    existing: existingIn(error),
   };
 }

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { detectedIn } from '@/components/intake/detected';
+import { detectedIn, existingIn } from '@/components/intake/detected';
 import { toClientError } from '@/lib/client/error';
 
 const found = { sheets: [], proposed: null, sure: false, problems: [], sample: [], preview: [] };
@@ -14,5 +14,14 @@ describe('detectedIn', () => {
     expect(detectedIn(toClientError(422, JSON.stringify({ title: 'No' })))).toBeNull();
     expect(detectedIn(toClientError(409, JSON.stringify({ title: 'No', detected: found })))).toBeNull();
     expect(detectedIn(new Error('x'))).toBeNull();
+  });
+});
+
+describe('existingIn', () => {
+  it('finds the revision that the same file is already', () => {
+    const body = JSON.stringify({ title: 'No', submission: 's', revision: 2 });
+    expect(existingIn(toClientError(409, body))).toEqual({ id: 's', revision: 2 });
+    expect(existingIn(toClientError(409, '{}'))).toBeNull();
+    expect(existingIn(toClientError(422, body))).toBeNull();
   });
 });

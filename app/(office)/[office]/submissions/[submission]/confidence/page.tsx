@@ -1,4 +1,5 @@
 import type { Metadata } from 'next';
+import { requireSession } from '@/app/require-session';
 import { ConfidencePlace } from '@/components/confidence/confidence-place';
 
 export const metadata: Metadata = { title: 'Confidence' };
@@ -9,5 +10,6 @@ export default async function ConfidencePage({
   params: Promise<{ office: string; submission: string }>;
 }) {
   const { office, submission } = await params;
+  await requireSession(`/${office}/submissions/${submission}/confidence`);
   return <ConfidencePlace office={office} submission={submission} />;
 }

@@ -1,4 +1,5 @@
 import type { Metadata } from 'next';
+import { requireSession } from '@/app/require-session';
 import { PathPlace } from '@/components/path/path-place';
 
 export const metadata: Metadata = { title: 'Path' };
@@ -9,5 +10,6 @@ export default async function PathPage({
   params: Promise<{ office: string; submission: string }>;
 }) {
   const { office, submission } = await params;
+  await requireSession(`/${office}/submissions/${submission}/path`);
   return <PathPlace office={office} submission={submission} />;
 }

@@ -1,3 +1,4 @@
+import { requireSession } from '@/app/require-session';
 import { RecordPage } from '@/components/record/record-page';
 
 interface Props {
@@ -5,5 +6,7 @@ interface Props {
 }
 
 export default async function SubmissionRecord({ params }: Props) {
-  return <RecordPage {...await params} />;
+  const { office, submission } = await params;
+  await requireSession(`/${office}/submissions/${submission}/record`);
+  return <RecordPage office={office} submission={submission} />;
 }
