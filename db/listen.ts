@@ -23,6 +23,8 @@ class Listener {
   private client: Client | null = null;
   private retry: NodeJS.Timeout | null = null;
   private wait = FIRST_WAIT;
+  /** Settled once the present connection listens, or is known not to. */
+  established: Promise<void> = Promise.resolve();
 
   subscribe(submissionId: string, callback: Callback): () => void {
     const set = this.callbacks.get(submissionId) ?? new Set();
@@ -44,7 +46,7 @@ class Listener {
     client.on('error', () => this.lost(client));
     client.on('end', () => this.lost(client));
     client.on('notification', (message) => this.deliver(message.payload ?? ''));
-    client
+    this.established = client
       .connect()
       .then(() => client.query(`listen ${CHANNEL}`))
       .then(() => {
@@ -95,4 +97,9 @@ const holder = globalThis as typeof globalThis & { plumbrowListener?: Listener }
 export function subscribe(submissionId: string, callback: Callback): () => void {
   holder.plumbrowListener ??= new Listener();
   return holder.plumbrowListener.subscribe(submissionId, callback);
+}
+
+/** Resolves once what is sent from then on is heard; with a database out of reach, once that is known. */
+export async function listening(): Promise<void> {
+  await holder.plumbrowListener?.established;
 }

@@ -78,7 +78,7 @@ export async function lockProject(tx: Tx, projectId: string): Promise<void> {
 
 export async function findLatest(tx: Tx, projectId: string) {
   const [row] = await tx
-    .select({ revision: submissions.revision, fileSha256: submissions.fileSha256 })
+    .select({ id: submissions.id, revision: submissions.revision, fileSha256: submissions.fileSha256 })
     .from(submissions)
     .where(eq(submissions.projectId, projectId))
     .orderBy(desc(submissions.revision))
@@ -98,7 +98,7 @@ export async function insertSubmission(tx: Tx, values: NewSubmission, bytes: Uin
 }
 
 /** Earlier revisions that nobody decided on; gives those that changed. */
-export async function supersedeEarlier(tx: Tx, projectId: string, latest: string): Promise<{ id: string }[]> {
+export async function supersedeEarlier(tx: Tx, projectId: string, latest: string) {
   return tx
     .update(submissions)
     .set({ status: 'superseded', version: sql`${submissions.version} + 1` })
@@ -109,7 +109,7 @@ export async function supersedeEarlier(tx: Tx, projectId: string, latest: string
         sql`${submissions.status} in ('received', 'under review', 'returned')`,
       ),
     )
-    .returning({ id: submissions.id });
+    .returning({ id: submissions.id, version: submissions.version });
 }
 
 export async function findFile(tx: Tx, submissionId: string): Promise<Uint8Array | null> {

@@ -46,8 +46,9 @@ export function eventStreamResponse(stream: EventStream, signal: AbortSignal): R
         .then(
           (stop) => {
             // It may have ended while the subscription was being made.
-            if (closed) stop();
-            else unsubscribe = stop;
+            if (closed) return stop();
+            unsubscribe = stop;
+            write(': listening\n\n');
           },
           (error: unknown) => {
             log.error({ err: error }, 'the event stream could not be opened');

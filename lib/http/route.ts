@@ -68,7 +68,9 @@ function handler<Who>(
 }
 
 async function read(request: Request, path: Call['path'], { takes = 'json' }: Options): Promise<Call> {
-  const query = Object.fromEntries(new URL(request.url).searchParams);
+  // A parameter without a value is one that was not given: a form's empty field.
+  const given = [...new URL(request.url).searchParams].filter(([, value]) => value !== '');
+  const query = Object.fromEntries(given);
   const sends = request.method !== 'GET' && request.method !== 'HEAD';
   return {
     path,

@@ -1,4 +1,5 @@
 import { items } from '@/lib/contract/shared';
+import { sheetRowsQuery, sheetRowsView } from '@/lib/contract/sheet-rows';
 import * as submission from '@/lib/contract/submission';
 import type { Operation } from './operation';
 
@@ -25,6 +26,15 @@ export const ofSubmission: readonly Operation[] = [
     summary: 'Its activities, in a state of the schedule.',
     query: submission.activitiesQuery,
     answer: items(submission.activityView),
+  },
+  {
+    id: 'getSheetRows',
+    method: 'get',
+    path: `${SUBMISSION}/rows`,
+    tag: 'submissions',
+    summary: 'A piece of the sheet that the list stands on, as received and as corrected.',
+    query: sheetRowsQuery,
+    answer: sheetRowsView,
   },
   {
     id: 'listFindings',

@@ -1,0 +1,75 @@
+import { findProject, type ProjectRow } from '@/db/queries/projects';
+import { insertSubmission } from '@/db/queries/submissions';
+import { storable } from '@/db/storable';
+import type { OfficeContext } from '@/lib/access/context';
+import { requirePermission } from '@/lib/access/permissions';
+import type { SubmissionView } from '@/lib/contract/submission';
+import type { Form } from '@/lib/contract/transfer';
+import { firstFindings } from '@/lib/services/findings/reconcile';
+import { draftFindings } from '@/lib/services/findings/rows';
+import { found, idOf, inOffice } from '@/lib/services/in-office';
+import { settleMatching } from '@/lib/services/intake/matching';
+import { readUpload, readUploadedSheets } from '@/lib/services/intake/upload';
+import { datesOfProject } from '@/lib/services/projects/view';
+import { rememberSheets, rememberState } from '@/lib/services/schedule/load';
+import { computed, readState } from '@/lib/services/schedule/state';
+import { sha256 } from './digest';
+import { correctedFigures, figuresOf } from './figures';
+import { readingOf } from './reading';
+import { requireSubmission } from './require';
+import { nextRevision, recordReceived, storeList, supersede } from './store';
+import { submissionView } from './view';
+
+/** Takes a file in as the project's next revision: reads, audits and computes it, then keeps all of it or nothing. */
+export async function createSubmission(
+  ctx: OfficeContext,
+  { path, form }: { path: { project: string }; form: Form },
+): Promise<SubmissionView> {
+  requirePermission(ctx, 'submissions:create');
+  const projectId = idOf(path.project, 'project');
+  const row: ProjectRow = found(await inOffice(ctx, (tx) => findProject(tx, projectId)), 'project');
+
+  const { file, wanted } = readUpload(form);
+  const digest = sha256(file.bytes);
+  const sheets = readUploadedSheets(file);
+  const how = { matching: settleMatching(sheets, wanted), reading: readingOf(row) };
+  const state = await readState(sheets, how);
+  const audit = firstFindings(draftFindings(state));
+  const dates = datesOfProject(row);
+  const summary = {
+    received: figuresOf('received', computed(state), dates),
+    ...(await correctedFigures(state, how, new Set(), dates)),
+  };
+
+  const id = crypto.randomUUID();
+  const view = await inOffice(ctx, async (tx) => {
+    const revision = await nextRevision(tx, projectId, digest, form.fields.again?.[0] === 'true');
+    const values = {
+      id,
+      officeId: ctx.office.id,
+      projectId,
+      contractorId: row.contractor.id,
+      revision,
+      fileName: file.name,
+      fileSha256: digest,
+      fileBytes: file.bytes.byteLength,
+      ...how,
+      rows: { counts: state.list.rows, refused: state.list.refused },
+      summary,
+      receivedBy: ctx.user.id,
+    };
+    await insertSubmission(tx, storable(values), file.bytes);
+    await storeList(tx, ctx, id, state.list, audit);
+    await recordReceived(tx, ctx, id, {
+      revision,
+      file: file.name,
+      sha256: digest,
+      findings: audit.findings.length,
+    });
+    await supersede(tx, ctx, projectId, id, revision);
+    return submissionView(tx, await requireSubmission(tx, id));
+  });
+  rememberSheets(digest, sheets);
+  rememberState({ id, version: view.version }, 'received', state);
+  return view;
+}
