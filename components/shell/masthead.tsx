@@ -6,6 +6,7 @@ import { useHotkeys } from '@/components/ui/hotkeys';
 import { KeysDialog } from '@/components/ui/keys-dialog';
 import { AccountMenu } from './account-menu';
 import { CrumbTrail } from './crumbs';
+import { FindButton, FindDialog } from './find-dialog';
 import { Mark } from './mark';
 import { useOfficeView } from './office-context';
 
@@ -28,14 +29,20 @@ export function MastheadFrame({ home, children }: { home: string; children?: Rea
 export function Masthead() {
   const office = useOfficeView();
   const [keysOpen, setKeysOpen] = useState(false);
+  const [finding, setFinding] = useState(false);
   const home = `/${office.slug}`;
-  useHotkeys('Everywhere', [{ key: '?', does: 'Show this list of keys', run: () => setKeysOpen(true) }]);
+  useHotkeys('Everywhere', [
+    { key: 'f', does: 'Find a project, an activity, a rule', run: () => setFinding(true) },
+    { key: '?', does: 'Show this list of keys', run: () => setKeysOpen(true) },
+  ]);
   return (
     <MastheadFrame home={home}>
       <CrumbTrail office={{ label: office.name, href: home }} />
-      <div className="print:hidden">
+      <div className="flex items-center gap-2 print:hidden">
+        <FindButton onOpen={() => setFinding(true)} />
         <AccountMenu onKeys={() => setKeysOpen(true)} />
       </div>
+      {finding && <FindDialog onClose={() => setFinding(false)} />}
       <KeysDialog open={keysOpen} onOpenChange={setKeysOpen} />
     </MastheadFrame>
   );

@@ -3,14 +3,7 @@
 import Link from 'next/link';
 import { useSelectedLayoutSegments } from 'next/navigation';
 import { useMay, useOfficeView } from './office-context';
-
-const PLACES = [
-  { segment: null, label: 'Desk', permission: 'office:read' },
-  { segment: 'projects', label: 'Projects', permission: 'projects:read' },
-  { segment: 'contractors', label: 'Contractors', permission: 'contractors:read' },
-  { segment: 'people', label: 'People', permission: 'members:read' },
-  { segment: 'rules', label: 'Rules', permission: 'rules:read' },
-] as const;
+import { PLACES } from './places';
 
 /** The places of the office hang from the masthead; the bob hangs at the present one. */
 export function OfficeRail() {

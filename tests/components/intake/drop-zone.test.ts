@@ -3,7 +3,10 @@ import { describe, expect, it } from 'vitest';
 import { refusal } from '@/components/intake/drop-zone';
 
 const rejected = (code: string, size = 3): FileRejection => ({
-  file: new File([new Uint8Array(size)], 'list.xlsx'),
+  file: Object.assign(new File([new Uint8Array(size)], 'list.xlsx'), {
+    path: './list.xlsx',
+    relativePath: './list.xlsx',
+  }),
   errors: [{ code, message: code }],
 });
 
