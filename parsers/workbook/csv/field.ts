@@ -24,8 +24,11 @@ export function writeField(
     const held = `="${text}"`;
     return style.quoted || held.includes(delimiter) || /[\r\n]/.test(text) ? quote(held) : held;
   }
-  const held = startsLikeFormula(text) && !trusted(text) ? `'${text}` : text;
+  const held = needsGuard(text) && !trusted(text) ? `'${text}` : text;
   return style.quoted || held.includes(delimiter) || /["\r\n]/.test(held) ? quote(held) : held;
 }
 
 const quote = (text: string) => `"${text.replaceAll('"', '""')}"`;
+
+/** Our reader takes one apostrophe off before such a text, so one that has its own gets a second. */
+const needsGuard = (text: string) => startsLikeFormula(text) || /^'+[=+\-@\t\r\n]/.test(text);

@@ -45,6 +45,8 @@ function furtherFields(
     .join('');
 }
 
+const AS_TEXT = /^="[^"]*"$/;
+
 function walk(units: string, dialect: Dialect, wanted: Wanted): Walk {
   const { delimiter, preamble, encoding } = dialect;
   const cursor = new FieldCursor(units, delimiter, preamble.length);
@@ -60,12 +62,12 @@ function walk(units: string, dialect: Dialect, wanted: Wanted): Walk {
     column += 1;
     if (cursor.quoted) quoted += 1;
     else if (cursor.end > cursor.start) bare += 1;
-    if (startsLikeFormula(cursor.value)) formulas.add(cursor.value);
+    if (startsLikeFormula(cursor.value) && !AS_TEXT.test(cursor.value)) formulas.add(cursor.value);
     const row = wanted.get(cursor.record);
     const { start, end, last } = cursor;
     if (row?.has(column)) {
       const to = row.get(column) ?? null;
-      const asText = /^="[^"]*"$/.test(cursor.value);
+      const asText = AS_TEXT.test(cursor.value);
       const isQuoted = cursor.quoted;
       const empty = start === end;
       changes.push({
