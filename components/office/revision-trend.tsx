@@ -105,7 +105,7 @@ function Trend({ points, write, unit, fromZero = false }: TrendProps) {
 function finishTitle(points: readonly TrendPoint[], format: Format): string {
   const moved = movement(points);
   if (!moved) return 'The finish cannot be followed yet';
-  const span = `from Rev ${String(moved.from.revision)} to Rev ${String(moved.to.revision)}`;
+  const span = `from Rev\u00a0${String(moved.from.revision)} to Rev\u00a0${String(moved.to.revision)}`;
   if (Math.abs(moved.by) < 0.05) return `The expected finish stayed where it was ${span}`;
   const word = moved.by > 0 ? 'later' : 'earlier';
   return `The expected finish is ${format.days(Math.abs(moved.by))} ${word}, ${span}`;
@@ -116,7 +116,7 @@ function findingsTitle(points: readonly TrendPoint[]): string {
   if (!moved) return 'Findings over the revisions';
   const { from, to } = moved;
   if (moved.by === 0)
-    return `As many findings in Rev ${String(to.revision)} as in Rev ${String(from.revision)}`;
+    return `As many findings in Rev\u00a0${String(to.revision)} as in Rev\u00a0${String(from.revision)}`;
   const word = moved.by < 0 ? 'Fewer' : 'More';
-  return `${word} findings: ${String(from.value)} in Rev ${String(from.revision)}, ${String(to.value)} in Rev ${String(to.revision)}`;
+  return `${word} findings: ${String(from.value)} in Rev\u00a0${String(from.revision)}, ${String(to.value)} in Rev\u00a0${String(to.revision)}`;
 }

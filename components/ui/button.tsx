@@ -71,7 +71,7 @@ export function ButtonAnchor({
 }
 
 const BASE =
-  'inline-flex min-h-8 items-center justify-center gap-2 rounded border px-3 py-1 text-sm font-semibold ' +
+  'inline-flex min-h-8 items-center justify-center gap-2 rounded border px-3 py-1 text-sm font-semibold print:hidden ' +
   'disabled:cursor-not-allowed disabled:opacity-50 aria-disabled:cursor-progress aria-disabled:opacity-60';
 
 const VARIANTS: Record<Variant, string> = {

@@ -39,17 +39,19 @@ export function Dialog({
             wide ? 'max-w-3xl' : 'max-w-lg',
           )}
         >
-          <div className="flex items-start justify-between gap-4 p-4 pb-2">
-            <Radix.Title className="text-lg font-semibold">{title}</Radix.Title>
-            <Radix.Close aria-label="Close" className="rounded p-1 text-slate hover:bg-tint hover:text-ink">
-              <X aria-hidden="true" size={18} />
-            </Radix.Close>
-          </div>
+          <Radix.Title className="p-4 pr-12 pb-2 text-lg font-semibold">{title}</Radix.Title>
           <div className="overflow-auto px-4 pb-4">
             {description && <Radix.Description className="mb-3 text-slate">{description}</Radix.Description>}
             {children}
           </div>
           {footer && <div className="flex flex-wrap gap-2 border-t border-hair p-4">{footer}</div>}
+          {/* Last, so that the focus goes to what the dialog is for. */}
+          <Radix.Close
+            aria-label="Close"
+            className="absolute top-4 right-4 rounded p-1 text-slate hover:bg-tint hover:text-ink"
+          >
+            <X aria-hidden="true" size={18} />
+          </Radix.Close>
         </Radix.Content>
       </Radix.Portal>
     </Radix.Root>
