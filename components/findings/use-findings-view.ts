@@ -1,7 +1,7 @@
 'use client';
 
 import { useSearchParams } from 'next/navigation';
-import { useEffect, useEffectEvent, useMemo, useRef, useState, type RefObject } from 'react';
+import { useEffect, useEffectEvent, useMemo, useRef, useState } from 'react';
 import type { FindingView } from '@/lib/contract/submission';
 import { filterFromQuery, filterToQuery, matches, NO_FILTER, type FindingFilter } from './filter';
 import { isOrder, keepPlaces, ordered, type FindingOrder } from './order';
@@ -21,13 +21,11 @@ export function useFindingsView(findings: readonly FindingView[]) {
   const ids = useMemo(() => shown.map(({ id }) => id), [shown]);
   const linked = query.get('finding');
   const [selected, setSelected] = useSelection(ids, linked);
-  const written = useRef(linked);
-  useLinked(linked, written, (id) => {
+  useAddress({ filter, order, selected }, linked, (id) => {
     // A link to a finding shows it, whatever was filtered before.
     if (!ids.includes(id)) setFilter(NO_FILTER);
     setSelected(id);
   });
-  useAddress(filter, order, selected, written);
 
   return {
     filter,
@@ -49,11 +47,13 @@ function orderFrom(query: URLSearchParams): FindingOrder {
 
 /** In order as of when that order was chosen; what changes afterwards stays in its place. */
 function usePlaced(findings: readonly FindingView[], order: FindingOrder): readonly FindingView[] {
-  const [places, setPlaces] = useState<{ order: FindingOrder; ids: readonly string[] } | null>(null);
-  const stale = places?.order !== order;
-  const current = stale ? { order, ids: ordered(findings, order).map(({ id }) => id) } : places;
-  if (stale) setPlaces(current);
-  return useMemo(() => keepPlaces(findings, current.ids), [findings, current]);
+  const [places, setPlaces] = useState(() => placesIn(findings, order));
+  if (places.order !== order) setPlaces(placesIn(findings, order));
+  return useMemo(() => keepPlaces(findings, places.ids), [findings, places]);
+}
+
+function placesIn(findings: readonly FindingView[], order: FindingOrder) {
+  return { order, ids: ordered(findings, order).map(({ id }) => id) };
 }
 
 /** Follows the list as it changes under it. */
@@ -70,35 +70,35 @@ function useSelection(
   return [selected, setSelected];
 }
 
-/** Calls `follow` where a link on the page leads to another finding; our own writing is no link. */
-function useLinked(linked: string | null, written: RefObject<string | null>, follow: (id: string) => void) {
-  const onLink = useEffectEvent((id: string) => {
-    if (id !== written.current) follow(id);
-    written.current = id;
-  });
-  useEffect(() => {
-    if (linked !== null) onLink(linked);
-  }, [linked]);
+interface Shown {
+  readonly filter: FindingFilter;
+  readonly order: FindingOrder;
+  readonly selected: string | null;
 }
 
-/** Writes into the address what is shown, so that it can be reloaded, gone back to and sent to a colleague. */
-function useAddress(
-  filter: FindingFilter,
-  order: FindingOrder,
-  selected: string | null,
-  written: RefObject<string | null>,
-) {
+/**
+ * Writes into the address what is shown, so that it can be reloaded, gone back to and sent to a colleague;
+ * calls `follow` where a link leads to another finding.
+ */
+function useAddress({ filter, order, selected }: Shown, linked: string | null, follow: (id: string) => void) {
+  // Our own writing comes back as the address' finding, and is no link.
+  const written = useRef(linked);
+  const onLink = useEffectEvent((id: string) => follow(id));
+  useEffect(() => {
+    if (linked !== null && linked !== written.current) onLink(linked);
+    written.current = linked;
+  }, [linked]);
+
   useEffect(() => {
     const timer = setTimeout(() => {
       const query = filterToQuery(filter);
       if (order !== DEFAULT_ORDER) query.set('order', order);
       if (selected) query.set('finding', selected);
       const search = query.size > 0 ? `?${query.toString()}` : '';
-      if (search !== window.location.search) {
-        written.current = selected;
-        window.history.replaceState(null, '', window.location.pathname + search);
-      }
+      if (search === window.location.search) return;
+      written.current = selected;
+      window.history.replaceState(null, '', window.location.pathname + search);
     }, SETTLED_MS);
     return () => clearTimeout(timer);
-  }, [filter, order, selected, written]);
+  }, [filter, order, selected]);
 }

@@ -25,7 +25,7 @@ export function useSteps(office: string, submission: string) {
   const [trouble, setTrouble] = useState<Trouble | null>(null);
   const [said, setSaid] = useState('');
   /** Batches made on this page, the latest last. */
-  const made = useRef<string[]>([]);
+  const [made, setMade] = useState<readonly string[]>([]);
   const underWay = useRef(new Set<string>());
 
   /** Runs a step unless the same is under way: a double click sends once. */
@@ -52,7 +52,7 @@ export function useSteps(office: string, submission: string) {
       correct.mutateAsync({ kind: 'undo', correction: batch }),
     );
     if (!result) return false;
-    made.current = made.current.filter((known) => known !== batch);
+    setMade((all) => all.filter((known) => known !== batch));
     setSaid(outcomeSentence('Undone.', result, format));
     return true;
   };
@@ -60,10 +60,10 @@ export function useSteps(office: string, submission: string) {
   const change = async (name: string, finding: string | null, step: CorrectionStep, done: string) => {
     const result = await run(name, finding, () => correct.mutateAsync(step));
     if (!result) return false;
-    if (result.batch) made.current.push(result.batch);
+    const { batch, items, skipped } = result;
+    if (batch) setMade((all) => [...all, batch]);
     const sentence = outcomeSentence(done, result, format);
     setSaid(sentence);
-    const { batch, items, skipped } = result;
     if (skipped.length > 0) toast({ text: skippedSentence(result), tone: 'trouble' });
     if (items.length > 1 && batch) {
       toast({ text: sentence, action: { label: 'Undo all', run: () => void undo(batch, null) } });
@@ -74,6 +74,8 @@ export function useSteps(office: string, submission: string) {
   return {
     said,
     trouble,
+    /** The batch that `undoLast` would take back. */
+    last: made.at(-1) ?? null,
     busy: correct.isPending || setFix.isPending,
     forgetTrouble: () => setTrouble(null),
     adopt: (finding: FindingView, fix: FixView) =>
@@ -112,7 +114,7 @@ export function useSteps(office: string, submission: string) {
     },
     /** The last step made on this page; false where there is none. */
     undoLast: async (): Promise<boolean> => {
-      const batch = made.current.at(-1);
+      const batch = made.at(-1);
       if (batch === undefined) return false;
       await undo(batch, null);
       return true;

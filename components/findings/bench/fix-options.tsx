@@ -4,9 +4,8 @@ import { useId, type ReactNode } from 'react';
 import { StateWord } from '@/components/ui/state-word';
 import { fixesOf } from '@/lib/client/findings';
 import type { SheetRowsView } from '@/lib/contract/sheet-rows';
-import type { FindingView, FixView } from '@/lib/contract/submission';
-import { pieceOf } from '../edit-text';
-import { PieceText } from '../piece-text';
+import type { FindingView } from '@/lib/contract/submission';
+import { EditsText } from './edits-text';
 import { EffectLine } from './effect-line';
 import { BY_HAND } from './fix-choice';
 
@@ -29,7 +28,7 @@ export function FixOptions({ finding, piece, option, onOption, byHand }: FixOpti
           <span className="block">
             {fix.reason} {fix.state !== 'proposed' && <StateWord state={fix.state} />}
           </span>
-          <EditsText fix={fix} />
+          <EditsText edits={fix.edits} />
           <EffectLine finding={finding} fix={fix} piece={piece} />
         </Option>
       ))}
@@ -70,22 +69,5 @@ function Option({
       />
       <span className="min-w-0 flex-1">{children}</span>
     </label>
-  );
-}
-
-/** As many edits as are spelt out; the rest are counted. */
-const SPELT_OUT = 4;
-
-function EditsText({ fix }: { fix: FixView }) {
-  const more = fix.edits.length - SPELT_OUT;
-  return (
-    <span className="block">
-      {fix.edits.slice(0, SPELT_OUT).map((edit) => (
-        <span key={`${edit.sheet} ${edit.cell}`} className="mr-3 inline-block">
-          <span className="text-slate">{edit.cell}</span> <PieceText piece={pieceOf(edit)} />
-        </span>
-      ))}
-      {more > 0 && <span className="text-slate">and {more} more cells</span>}
-    </span>
   );
 }

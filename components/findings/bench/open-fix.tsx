@@ -1,0 +1,60 @@
+'use client';
+
+import type { FindingView } from '@/lib/contract/submission';
+import { BenchActions } from './bench-actions';
+import { BY_HAND } from './fix-choice';
+import { FixOptions } from './fix-options';
+import { HandEditForm } from './hand-edit';
+import type { BenchState } from './use-bench';
+
+interface OpenFixProps {
+  finding: FindingView;
+  bench: BenchState;
+  ofRule: number;
+  busy: boolean;
+  onAdoptRule: () => void;
+}
+
+/** What can be done about a finding that is not settled yet. */
+export function OpenFix({ finding, bench, ofRule, busy, onAdoptRule }: OpenFixProps) {
+  const { cells, piece, option, fix, hand } = bench;
+  return (
+    <>
+      {!finding.fix && (
+        <p className="text-slate">
+          No fix can honestly be proposed for this.{' '}
+          {cells.length > 0 ? 'Write another value by hand, or ask about it below.' : 'Ask about it below.'}
+        </p>
+      )}
+      <FixOptions
+        finding={finding}
+        piece={piece}
+        option={option}
+        onOption={bench.choose}
+        byHand={
+          cells.length > 0 &&
+          piece && (
+            <HandEditForm
+              sheet={piece.sheet}
+              cells={cells}
+              piece={piece}
+              typed={hand.typed}
+              onType={hand.type}
+              onSend={bench.write}
+              busy={busy}
+              first={bench.firstCell}
+            />
+          )
+        }
+      />
+      <BenchActions
+        fix={option === BY_HAND ? null : fix}
+        ofRule={ofRule}
+        busy={busy}
+        onAdopt={bench.adopt}
+        onDecline={bench.decline}
+        onAdoptRule={onAdoptRule}
+      />
+    </>
+  );
+}
