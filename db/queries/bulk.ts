@@ -1,4 +1,4 @@
-import { sql, type SQL } from 'drizzle-orm';
+import { type AnyColumn, sql, type SQL } from 'drizzle-orm';
 import type { Tx } from '../client';
 import { storable } from '../storable';
 
@@ -18,4 +18,9 @@ export async function inBatches<Row>(
     const json = JSON.stringify(storable(rows.slice(from, from + BATCH)));
     await tx.execute(statement(sql`${json}::json`));
   }
+}
+
+/** That an id is among these, however many they are: one parameter in place of one each. */
+export function among(column: AnyColumn, ids: Iterable<string>): SQL {
+  return sql`${column} = any(${sql.param([...ids])}::uuid[])`;
 }

@@ -1,8 +1,8 @@
-import { and, asc, eq, inArray, isNull, sql } from 'drizzle-orm';
+import { and, asc, eq, isNull, sql } from 'drizzle-orm';
 import type { CellEdit } from '@/lib/schedule/edit';
 import type { Tx } from '../client';
 import { corrections, memberships, users } from '../schema';
-import { inBatches } from './bulk';
+import { among, inBatches } from './bulk';
 
 export interface NewCorrection {
   readonly id: string;
@@ -76,7 +76,7 @@ export async function withdrawCorrections(
     .where(
       and(
         eq(corrections.submissionId, submissionId),
-        inArray(corrections.id, [...ids]),
+        among(corrections.id, ids),
         isNull(corrections.withdrawnAt),
       ),
     );

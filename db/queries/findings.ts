@@ -3,7 +3,7 @@ import type { MessageData } from '@/lib/audit/rule';
 import type { FindingState, Weight } from '@/lib/schedule/weight';
 import type { Tx } from '../client';
 import { findings, type FindingOrigin } from '../schema';
-import { inBatches } from './bulk';
+import { among, inBatches } from './bulk';
 
 export interface NewFinding {
   readonly id: string;
@@ -60,11 +60,12 @@ export async function insertFindings(
   );
 }
 
-export async function listFindings(tx: Tx, submissionId: string) {
+/** All of a submission, or of these ids, in their order. */
+export async function listFindings(tx: Tx, submissionId: string, only?: Iterable<string>) {
   return tx
     .select(columns)
     .from(findings)
-    .where(eq(findings.submissionId, submissionId))
+    .where(and(eq(findings.submissionId, submissionId), only && among(findings.id, only)))
     .orderBy(asc(findings.position), asc(findings.id));
 }
 
@@ -102,12 +103,11 @@ export interface FindingChange {
   readonly cell: string | null;
 }
 
-/** A finding seen again may say something else: its state, sentence and place are written anew. */
-export async function updateFindings(
-  tx: Tx,
-  submissionId: string,
-  rows: readonly FindingChange[],
-): Promise<void> {
+/**
+ * A finding seen again may say something else: its state, sentence and place are written anew. Joined by the
+ * id alone: with the submission named as well, and before any statistics, the server compares each with each.
+ */
+export async function updateFindings(tx: Tx, rows: readonly FindingChange[]): Promise<void> {
   await inBatches(
     tx,
     rows,
@@ -117,15 +117,13 @@ export async function updateFindings(
           activity_name = r.activity_name, row = r.row, cell = r.cell
       from json_to_recordset(${json})
         as r(id uuid, state text, weight text, message_id text, data jsonb, activity_name text, row int, cell text)
-      where f.id = r.id and f.submission_id = ${submissionId}`,
+      where f.id = r.id`,
   );
 }
 
 export async function deleteFindings(tx: Tx, submissionId: string, ids: readonly string[]): Promise<void> {
   if (ids.length === 0) return;
-  await tx
-    .delete(findings)
-    .where(and(eq(findings.submissionId, submissionId), inArray(findings.id, [...ids])));
+  await tx.delete(findings).where(and(eq(findings.submissionId, submissionId), among(findings.id, ids)));
 }
 
 /** Ids of the findings with these keys, in their order. */

@@ -1,9 +1,9 @@
-import { and, asc, eq, inArray, sql } from 'drizzle-orm';
+import { and, asc, eq, sql } from 'drizzle-orm';
 import type { CellEdit } from '@/lib/schedule/edit';
 import type { FixState } from '@/lib/schedule/weight';
 import type { Tx } from '../client';
 import { findings, fixes } from '../schema';
-import { inBatches } from './bulk';
+import { among, inBatches } from './bulk';
 
 /** As a statement takes it: all that can change of a fix, and what it hangs from. */
 export interface FixValues {
@@ -40,7 +40,8 @@ export async function insertFixes(
   );
 }
 
-export async function updateFixes(tx: Tx, submissionId: string, rows: readonly FixValues[]): Promise<void> {
+/** Joined by the id alone, as the findings are. */
+export async function updateFixes(tx: Tx, rows: readonly FixValues[]): Promise<void> {
   await inBatches(
     tx,
     rows,
@@ -49,12 +50,12 @@ export async function updateFixes(tx: Tx, submissionId: string, rows: readonly F
       set reason = r.reason, edits = r.edits, effect_expected = r.effect_expected,
           effect_variance = r.effect_variance, state = r.state
       from json_to_recordset(${json}) as ${record}
-      where f.id = r.id and f.submission_id = ${submissionId}`,
+      where f.id = r.id`,
   );
 }
 
-/** By finding and rank. */
-export async function listFixes(tx: Tx, submissionId: string) {
+/** All of a submission, or of these findings, by finding and rank. */
+export async function listFixes(tx: Tx, submissionId: string, ofFindings?: Iterable<string>) {
   return tx
     .select({
       id: fixes.id,
@@ -67,13 +68,13 @@ export async function listFixes(tx: Tx, submissionId: string) {
       state: fixes.state,
     })
     .from(fixes)
-    .where(eq(fixes.submissionId, submissionId))
+    .where(and(eq(fixes.submissionId, submissionId), ofFindings && among(fixes.findingId, ofFindings)))
     .orderBy(asc(fixes.findingId), asc(fixes.rank));
 }
 
 export async function deleteFixes(tx: Tx, submissionId: string, ids: readonly string[]): Promise<void> {
   if (ids.length === 0) return;
-  await tx.delete(fixes).where(and(eq(fixes.submissionId, submissionId), inArray(fixes.id, [...ids])));
+  await tx.delete(fixes).where(and(eq(fixes.submissionId, submissionId), among(fixes.id, ids)));
 }
 
 /** Keys of the findings whose proposed fix was declined. */

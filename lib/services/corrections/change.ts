@@ -77,9 +77,9 @@ export async function writeChange(
   const { findings, fixes } = reconciliation;
   await deleteFixes(tx, id, fixes.erase);
   await deleteFindings(tx, id, findings.erase);
-  await updateFindings(tx, id, findings.update);
+  await updateFindings(tx, findings.update);
   await insertFindings(tx, ctx.office.id, id, findings.insert);
-  await updateFixes(tx, id, fixes.update);
+  await updateFixes(tx, fixes.update);
   await insertFixes(tx, ctx.office.id, id, fixes.insert);
   // Received is not reviewed: it is under review once somebody of the office works on it.
   const underReview = status === 'received' && ctx.contractor === null;

@@ -12,12 +12,12 @@ export async function findingViews(
   submission: string,
   only?: ReadonlySet<string>,
 ): Promise<FindingView[]> {
-  const findings = await listFindings(tx, submission);
-  const fixes = byFinding(await listFixes(tx, submission));
+  const findings = await listFindings(tx, submission, only);
+  const fixes = byFinding(await listFixes(tx, submission, only));
   const comments = await countComments(tx, submission);
-  return findings
-    .filter(({ id }) => !only || only.has(id))
-    .map((finding) => toView(finding, fixes.get(finding.id) ?? [], comments.get(finding.id) ?? 0));
+  return findings.map((finding) =>
+    toView(finding, fixes.get(finding.id) ?? [], comments.get(finding.id) ?? 0),
+  );
 }
 
 function toView(finding: FindingRow, fixes: readonly FixRow[], comments: number): FindingView {
