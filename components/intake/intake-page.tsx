@@ -1,6 +1,6 @@
 'use client';
 
-import { useEffect, useRef } from 'react';
+import { useEffect, useRef, type ReactNode } from 'react';
 import { Crumbs } from '@/components/shell/crumbs';
 import { useMay, useOfficeView } from '@/components/shell/office-context';
 import { Page } from '@/components/shell/page';
@@ -50,16 +50,37 @@ function Intake({ project, again }: { project: ProjectView; again: boolean }) {
   const { slug } = useOfficeView();
   const intake = useIntake(slug, project.id);
   const { stage, take } = intake;
-  const begun = useRef(false);
 
   useEffect(() => {
-    // Once, also where React mounts twice: what was dropped on the project's page is taken in here.
-    if (begun.current) return;
-    begun.current = true;
-    const file = handedOver(project.id);
+    // What was dropped on the project's page is taken in here.
+    const file = handedOver(project.id, again ? 'again' : 'take');
     if (file) void take(file, { look: again });
   }, [again, project.id, take]);
 
+  return (
+    <StagePlace at={stage.at}>
+      <StageView intake={intake} again={again} />
+    </StagePlace>
+  );
+}
+
+/** Takes the focus along when the stage changes: what held it is gone from the page. */
+function StagePlace({ at, children }: { at: string; children: ReactNode }) {
+  const place = useRef<HTMLDivElement>(null);
+  const before = useRef(at);
+  useEffect(() => {
+    if (before.current !== at) place.current?.focus({ preventScroll: true });
+    before.current = at;
+  }, [at]);
+  return (
+    <div ref={place} tabIndex={-1}>
+      {children}
+    </div>
+  );
+}
+
+function StageView({ intake, again }: { intake: ReturnType<typeof useIntake>; again: boolean }) {
+  const { stage, take, refuse, cancel } = intake;
   switch (stage.at) {
     case 'choose':
       return (
@@ -67,13 +88,13 @@ function Intake({ project, again }: { project: ProjectView; again: boolean }) {
           stage={stage}
           again={again}
           onFile={(file) => void take(file, { look: again })}
-          onRefused={intake.refuse}
+          onRefused={refuse}
         />
       );
     case 'reading':
-      return <TransferStage file={stage.file} share={stage.share} doing="reading" onCancel={intake.cancel} />;
+      return <TransferStage file={stage.file} share={stage.share} doing="reading" onCancel={cancel} />;
     case 'sending':
-      return <TransferStage file={stage.file} share={stage.share} doing="sending" onCancel={intake.cancel} />;
+      return <TransferStage file={stage.file} share={stage.share} doing="sending" onCancel={cancel} />;
     case 'matching':
       return <MatchingStage stage={stage} intake={intake} />;
   }

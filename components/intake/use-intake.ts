@@ -73,10 +73,8 @@ export function useIntake(office: string, project: string) {
         );
         if (how.straight) {
           // Kept, so that the same file can be read anew with other columns.
-          handOver(project, file);
+          handOver(project, file, 'again');
           noteReading(made.id, { sentence: readAs(draft), project });
-        } else {
-          forget();
         }
         client.setQueryData(keys.submission(office, made.id), made);
         void client.invalidateQueries({ queryKey: keys.projects(office) });
@@ -109,12 +107,15 @@ export function useIntake(office: string, project: string) {
       onProgress(0);
       try {
         const view = await detect(office, file, {}, { signal, onProgress });
+        forget();
         const draft = draftOf(view);
         if (view.sure && view.problems.length === 0 && !look)
           await send(file, view, draft, { straight: true });
         else setStage({ at: 'matching', file, view, draft, rereading: false, trouble: null });
       } catch (error) {
-        if (!signal.aborted) setStage({ at: 'choose', file, trouble: troubleOf(error) });
+        if (signal.aborted) return;
+        forget();
+        setStage({ at: 'choose', file, trouble: troubleOf(error) });
       }
     },
     [begin, office, send],

@@ -90,7 +90,7 @@ function HandIn({ project }: { project: ProjectView }) {
   const [refused, setRefused] = useState<string | null>(null);
   const next = project.latest ? project.latest.revision + 1 : 0;
   const take = (file: File) => {
-    handOver(project.id, file);
+    handOver(project.id, file, 'take');
     router.push(`/${slug}/projects/${project.id}/intake`);
   };
   return (
