@@ -15,8 +15,8 @@ const cellsOf = (sheets: readonly Sheet[]): number =>
   sheets.reduce((sum, { rows, columnCount }) => sum + rows.length * columnCount, 1000);
 
 /** What was parsed and computed last, in this process; a cache and nothing else. */
-const parsed = new Lru<readonly Sheet[]>(6_000_000, cellsOf);
-const states = new Lru<ReadState>(1_500_000, ({ list }) => 1000 + list.activities.length + list.links.length);
+const parsed = new Lru<readonly Sheet[]>(4_000_000, cellsOf);
+const states = new Lru<ReadState>(600_000, ({ list }) => 1000 + list.activities.length + list.links.length);
 
 type Submission = SubmissionRow['submission'];
 

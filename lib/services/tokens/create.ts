@@ -31,15 +31,12 @@ export async function createToken(
   });
 
   const { token, hash } = newToken();
-  const scope = { office: office.id, user: person.id, contractor: member.contractor };
-  await withOffice(scope, async (tx) => {
+  // As the office's own, whoever the token is for: its chain of the record is not a scheduler's to write to.
+  await withOffice({ office: office.id, user: person.id, contractor: null }, async (tx) => {
     const { name, readOnly } = request;
     await insertToken(tx, { officeId: office.id, membershipId: member.id, name, tokenHash: hash, readOnly });
-    // The office's own chain of the record is not a scheduler's to write to.
-    if (member.contractor === null) {
-      const event = { verb: 'token made', data: { email: person.email, name, readOnly } } as const;
-      await appendRecord(tx, { office, user: person }, event, { submission: null });
-    }
+    const event = { verb: 'token made', data: { email: person.email, name, readOnly } } as const;
+    await appendRecord(tx, { office, user: person }, event, { submission: null });
   });
   return { token, office: office.slug, role: member.role };
 }
