@@ -7,7 +7,7 @@ interface Span {
 }
 
 const SEPARATOR = /[,;&]|\r\n?|\n|(?<=\s)and(?=\s)/gi;
-const NONE = /^(?:[-–—]|none|n\/a)?$/i;
+const NONE = /^(?:[-\u2012-\u2015\u2212]+|none|nil|n\/?a|n\.a\.)?$/i;
 const DEFAULT_SEPARATOR = ', ';
 
 /** Entries between commas, semicolons, line breaks, `and` and `&`; those without text are left out. */

@@ -14,15 +14,13 @@ const KEPT = 50;
  * read: another rule has those.
  */
 function detached(context: AuditContext): number[][] {
-  const { waiting, followed } = intended(context);
+  const { obscure } = intended(context);
   const groups = groupsOf(context).filter(({ length }) => length > 1);
   const largest = groups.reduce(
     (best, group) => (group.length > best.length ? group : best),
     groups[0] ?? [],
   );
-  return groups.filter(
-    (group) => group !== largest && !group.some((one) => waiting.has(one) || followed.has(one)),
-  );
+  return groups.filter((group) => group !== largest && !group.some((one) => obscure.has(one)));
 }
 
 export const rule: Rule = {

@@ -9,22 +9,29 @@ import { type Reading, readingsOf } from '../support/readings';
 import { PRACTICE } from '../support/sources';
 import { called, capital, joinedIn } from '../support/words';
 
+const endsOf = ({ gives, owner }: LinkCell, other: number) =>
+  gives === 'predecessors' ? { from: other, to: owner } : { from: owner, to: other };
+
 function readingFix(cell: LinkCell, item: LinkItem, reading: Reading, only: boolean): Fix {
-  const [from, to] =
-    cell.gives === 'predecessors' ? [reading.activity, cell.owner] : [cell.owner, reading.activity];
   return {
     reason: only
       ? `“${item.text}” can be meant in this way only.`
       : `“${item.text}” can be meant in this way, and in others.`,
     edits: [linkEdit(cell, [{ op: 'replace', item: item.text, with: reading.text }])],
-    changes: [{ kind: 'add-link', from, to, type: reading.type, lag: reading.lag }],
+    changes: reading.links.map(({ activity, type, lag }) => ({
+      kind: 'add-link' as const,
+      ...endsOf(cell, activity),
+      type,
+      lag,
+    })),
   };
 }
 
-function fits({ network }: AuditContext, cell: LinkCell, { activity }: Reading): boolean {
-  return cell.gives === 'predecessors'
-    ? !wouldLoop(network, activity, cell.owner)
-    : !wouldLoop(network, cell.owner, activity);
+function fits({ network }: AuditContext, cell: LinkCell, { links }: Reading): boolean {
+  return links.every(({ activity }) => {
+    const { from, to } = endsOf(cell, activity);
+    return !wouldLoop(network, from, to);
+  });
 }
 
 function defectOf(context: AuditContext, cell: LinkCell, item: LinkItem): Defect[] {

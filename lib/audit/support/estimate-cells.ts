@@ -84,7 +84,7 @@ export function estimateFix(
     if (days === undefined || (days === estimate.days && estimate.problem === null)) continue;
     if (estimate.cell === null) return null;
     const { sheet } = estimate.cell;
-    const to = written(days, estimate, list);
+    const to = written(days, estimate, activity, list);
     edits.push({ sheet, cell: cellAddress(estimate.cell), from: estimate.content, to });
   }
   return edits.length === 0 ? null : { reason, edits, changes: changesOf(activity, wanted) };

@@ -27,7 +27,8 @@ function contentOf(list: ActivityList, activity: Activity, id: string): CellCont
 }
 
 function placeOf({ id, after, before }: FreeId): string {
-  if (after === null) return `${id} is free.`;
+  if (after === null && before === null) return `${id} is free.`;
+  if (after === null) return `${id} is free, and comes before ${before} in the list's pattern.`;
   if (before !== null) return `${id} is free, and lies between ${after} and ${before}.`;
   return `${id} is free, and follows ${after} in the list's pattern.`;
 }

@@ -65,10 +65,21 @@ function numbersBetween(
   return [...awaited, next, halfway].filter((n) => n > above.number && n < below.number);
 }
 
+/** The ID before that of the row below, for the first row of a sheet: –, A2 → A1. */
+function firstId(state: State, before: string | null): FreeId | null {
+  const below = before === null ? null : memberOf(before);
+  const series = below && state.series.get(below.series);
+  if (!below || !series || below.number <= series.step) return null;
+  const id = series.write(below.number - series.step, series.width);
+  if (state.taken.has(id)) return null;
+  return { id, after: null, before, awaitedBy: state.awaited.get(id) ?? [] };
+}
+
 /** The ID that is missing between the rows above and below: A4, –, A6 → A5. */
 function gapId(state: State, activity: Activity): FreeId | null {
   const [after, before] = [neighbour(state, activity, -1), neighbour(state, activity, 1)];
-  const above = after === null ? null : memberOf(after);
+  if (after === null) return firstId(state, before);
+  const above = memberOf(after);
   const series = above && state.series.get(above.series);
   if (!above || !series) return null;
   const below = before === null ? null : memberOf(before);

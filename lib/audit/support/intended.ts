@@ -15,33 +15,46 @@ export interface Intended {
   /** Activities with a predecessor (successor) cell that has an entry or an error, whatever it means. */
   readonly waiting: ReadonlySet<number>;
   readonly followed: ReadonlySet<number>;
+  /** Activities with an entry or a cell of which no one can say what it means. */
+  readonly obscure: ReadonlySet<number>;
 }
 
 type Pair = readonly [number, number];
 
-function fromUnknown(context: AuditContext): Pair[] {
-  return unknownLinks(context).flatMap((unknown) => {
+/** What was meant by the wrongly written links of one activity; none where no one can say. */
+interface Meant {
+  readonly owner: number;
+  readonly pairs: readonly Pair[];
+}
+
+function fromUnknown(context: AuditContext): Meant[] {
+  return unknownLinks(context).map((unknown) => {
     const meant = unknown.unnamed ?? unknown.near[0];
-    return meant ? [endsWith(unknown, meant.index)] : [];
+    return { owner: unknown.owner.index, pairs: meant ? [endsWith(unknown, meant.index)] : [] };
   });
 }
 
-function fromHeadings(context: AuditContext): Pair[] {
-  const ends = linkedHeadings(context);
-  return context.list.links.flatMap(({ from, to, fromIndex, toIndex }): Pair[] => {
-    if (fromIndex < 0) return (ends.get(from)?.last ?? []).map((activity) => [activity, toIndex]);
-    if (toIndex < 0) return (ends.get(to)?.first ?? []).map((activity) => [fromIndex, activity]);
-    return [];
+function fromHeadings(context: AuditContext): Meant[] {
+  const headings = linkedHeadings(context);
+  return context.list.links.flatMap(({ from, to, fromIndex, toIndex }): Meant[] => {
+    const ends = headings.get(fromIndex < 0 ? from : toIndex < 0 ? to : '');
+    if (!ends) return [];
+    return fromIndex < 0
+      ? [{ owner: toIndex, pairs: ends.last.map((activity) => [activity, toIndex]) }]
+      : [{ owner: fromIndex, pairs: ends.first.map((activity) => [fromIndex, activity]) }];
   });
 }
 
-function fromUnreadable(list: ActivityList): Pair[] {
+function fromUnreadable(list: ActivityList): Meant[] {
   return list.linkCells.flatMap(({ owner, gives, items }) =>
-    items.flatMap((item): Pair[] => {
-      const other = item.link ? null : spokenOf(item, owner, list);
-      if (other === null) return [];
-      return [gives === 'predecessors' ? [other, owner] : [owner, other]];
-    }),
+    items
+      .filter(({ link }) => link === null)
+      .map((item) => ({
+        owner,
+        pairs: spokenOf(item, owner, list).map((other): Pair =>
+          gives === 'predecessors' ? [other, owner] : [owner, other],
+        ),
+      })),
   );
 }
 
@@ -55,9 +68,13 @@ export const intended = memo((context: AuditContext): Intended => {
   const unsettled = list.linkCells.filter((cell) => isUnsettled(list, cell));
   const owners = (gives: 'predecessors' | 'successors') =>
     new Set(unsettled.filter((cell) => cell.gives === gives).map(({ owner }) => owner));
+  const meant = [...fromUnknown(context), ...fromHeadings(context), ...fromUnreadable(list)];
+  const unreadable = list.linkCells.filter(({ error }) => error !== null).map(({ owner }) => owner);
+  const unclear = meant.filter(({ pairs }) => pairs.length === 0).map(({ owner }) => owner);
   return {
-    links: [...fromUnknown(context), ...fromHeadings(context), ...fromUnreadable(list)],
+    links: meant.flatMap(({ pairs }) => pairs),
     waiting: owners('predecessors'),
     followed: owners('successors'),
+    obscure: new Set([...unreadable, ...unclear]),
   };
 });

@@ -12,20 +12,27 @@ function contentFor(text: string, content: CellContent): CellContent {
   return typeof content === 'number' && String(Number(text)) === text ? Number(text) : text;
 }
 
+/** The cell written anew, for one whose entries nothing but blanks divide. */
+function rebuilt({ items }: LinkCell, changes: readonly ItemChange[]): string {
+  const texts = items.map(({ text }) => text);
+  for (const change of changes) {
+    const at = change.op === 'add' ? texts.length : texts.lastIndexOf(change.item);
+    if (change.op === 'add') texts.push(change.item);
+    else if (at >= 0) texts.splice(at, 1, ...(change.op === 'replace' ? [change.with] : []));
+  }
+  return texts.join(', ');
+}
+
 /** The change of a predecessor or successor cell, entry by entry and as its new text. */
 export function linkEdit(cell: LinkCell, items: readonly ItemChange[]): CellEdit {
-  const { text } = applyItems(cell.text, items, cell.separator === '' ? undefined : cell.separator);
-  const { sheet } = cell.cell;
-  const { content, separator } = cell;
-  const added = items.some(({ op }) => op === 'add') && separator !== '';
-  return {
-    sheet,
-    cell: cellAddress(cell.cell),
-    from: content,
-    to: contentFor(text, content),
-    items,
-    ...(added ? { separator } : {}),
-  };
+  const { content } = cell;
+  const separator =
+    cell.separator.trim() === '' && !cell.separator.includes('\n') ? undefined : cell.separator;
+  const applied = applyItems(cell.text, items, separator);
+  const place = { sheet: cell.cell.sheet, cell: cellAddress(cell.cell), from: content };
+  if (applied.unmet.length > 0) return { ...place, to: contentFor(rebuilt(cell, items), content) };
+  const added = separator !== undefined && items.some(({ op }) => op === 'add');
+  return { ...place, to: contentFor(applied.text, content), items, ...(added ? { separator } : {}) };
 }
 
 /** Removes links from the cells they are written in, one edit a cell. */

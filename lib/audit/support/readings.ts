@@ -3,61 +3,70 @@ import type { ActivityList } from '@/lib/schedule/activity-list';
 import { RELATIONS, type Relation } from '@/lib/schedule/relation';
 import { daysIn } from './written';
 
-/** A way of writing an entry, read: a link to an activity of the list. */
-export interface Reading {
-  readonly text: string;
+interface ReadLink {
   readonly activity: number;
   readonly type: Relation;
   /** Working days. */
   readonly lag: number;
 }
 
-const ENTRY = /^(.*?)\s*(?:\b(FS|SS|FF|SF)\b)?\s*([+-]\s*\d+(?:[.,]\d+)?\s*(?:d|h|w)?)?$/i;
-const LAG = /^([+-])\s*(\d+(?:[.,]\d+)?)\s*(d|h|w)?$/i;
+/** A way of writing an entry, read: links to activities of the list. */
+export interface Reading {
+  readonly text: string;
+  readonly links: readonly ReadLink[];
+}
+
+const ENTRY = /^(.*?)\s*(?:\b(FS|SS|FF|SF))?\s*([+\-\u2212\u2013]\s*\d[\d.,]*\s*\p{L}*)?$/iu;
+const LAG = /^([+\-\u2212\u2013])\s*(\d[\d.,]*)\s*(\p{L}*)$/u;
 const UNIT_OF = { d: 'day', h: 'hour', w: 'week' } as const;
 
 function lagDays(text: string | undefined, list: ActivityList): number {
-  const match = LAG.exec(text ?? '');
-  if (!match) return 0;
-  const letter = (match[3] ?? '').toLowerCase();
+  const [, sign, number = '0', word = ''] = LAG.exec(text ?? '') ?? [];
+  if (sign === undefined) return 0;
+  const letter = word.charAt(0).toLowerCase();
   const unit = letter === 'd' || letter === 'h' || letter === 'w' ? UNIT_OF[letter] : list.unit.value;
-  const value = Number((match[2] ?? '0').replace(',', '.')) * daysIn(unit, list.reading);
-  return match[1] === '-' ? -value : value;
+  const value = Number(number.replace(',', '.')) * daysIn(unit, list.reading);
+  return sign === '+' ? value : -value;
 }
 
 const relationOf = (text: string | undefined): Relation =>
   RELATIONS.find((relation) => relation === text?.toUpperCase()) ?? 'FS';
 
-/** Null where the reading names no activity of the list. */
-export function toReading(text: string, list: ActivityList): Reading | null {
-  const literal = list.indexOf.get(text.trim());
-  if (literal !== undefined) return { text, activity: literal, type: 'FS', lag: 0 };
-  const match = ENTRY.exec(text.trim());
-  const activity = match ? list.indexOf.get((match[1] ?? '').trim()) : undefined;
-  if (!match || activity === undefined) return null;
-  return { text, activity, type: relationOf(match[2]), lag: lagDays(match[3], list) };
+function toLink(text: string, list: ActivityList): ReadLink | null {
+  const literal = list.indexOf.get(text);
+  if (literal !== undefined) return { activity: literal, type: 'FS', lag: 0 };
+  const [, id = '', relation, lag] = ENTRY.exec(text) ?? [];
+  const activity = list.indexOf.get(id);
+  return activity === undefined ? null : { activity, type: relationOf(relation), lag: lagDays(lag, list) };
 }
 
-/** The readings of an entry that name an activity of the list other than its own, each once. */
+/** Null where part of the reading names no activity of the list. */
+function toReading(text: string, list: ActivityList): Reading | null {
+  const whole = toLink(text.trim(), list);
+  const links = whole ? [whole] : text.split(', ').map((part) => toLink(part.trim(), list));
+  return links.some((link) => link === null) ? null : { text, links: links.filter((link) => link !== null) };
+}
+
+/** The readings of an entry that name activities of the list other than its own, each once. */
 export function readingsOf(item: LinkItem, owner: number, list: ActivityList): Reading[] {
   return [...new Set(item.readings)].flatMap((text) => {
     const reading = toReading(text, list);
-    return reading && reading.activity !== owner ? [reading] : [];
+    return reading?.links.every(({ activity }) => activity !== owner) ? [reading] : [];
   });
 }
 
 /** An ID that stands first in an entry stands within so many characters. */
 const LONGEST_ID = 80;
 
-/** The activity an unreadable entry seems to speak of: by its readings, else by the ID it begins with. */
-export function spokenOf(item: LinkItem, owner: number, list: ActivityList): number | null {
+/** The activities an unreadable entry seems to speak of: by its first reading, else by the ID it begins with. */
+export function spokenOf(item: LinkItem, owner: number, list: ActivityList): number[] {
   const [reading] = readingsOf(item, owner, list);
-  if (reading) return reading.activity;
+  if (reading) return reading.links.map(({ activity }) => activity);
   for (let end = Math.min(item.text.length, LONGEST_ID); end > 0; end--) {
     const cut = item.text.slice(end - 1, end + 1);
     if (cut.length === 2 && /^[\p{L}\p{N}]{2}$/u.test(cut)) continue;
     const activity = list.indexOf.get(item.text.slice(0, end).trim());
-    if (activity !== undefined && activity !== owner) return activity;
+    if (activity !== undefined && activity !== owner) return [activity];
   }
-  return null;
+  return [];
 }

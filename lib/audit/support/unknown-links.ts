@@ -48,9 +48,13 @@ function fitness(
   return wouldLoop(network, from, to) ? 'loop' : 'fit';
 }
 
-/** Nearest in the list first, those above the activity before those below. */
-const byDistance = (owner: number) => (one: Activity, other: Activity) =>
-  Math.abs(one.index - owner - 0.25) - Math.abs(other.index - owner - 0.25);
+/**
+ * Those above the activity first, the nearest of them first: work waits for what is listed before it, and
+ * fixes that all point upwards close no loop together.
+ */
+const byPlace = (owner: number) => (one: Activity, other: Activity) =>
+  Number(one.index > owner) - Number(other.index > owner) ||
+  Math.abs(one.index - owner) - Math.abs(other.index - owner);
 
 function unnamedRows({ list }: AuditContext): ReadonlyMap<number, Activity> {
   const rows = new Map<number, Activity>();
@@ -82,7 +86,7 @@ function resolve(context: AuditContext, index: number, unnamed: Activity | null)
       ? { id: first.activity.id, why: first.fitness }
       : null;
   const how = nearest?.how ?? null;
-  near.sort(byDistance(owner.index));
+  near.sort(byPlace(owner.index));
   return { index, link, owner, gives, wanted, near, how, unfit, unnamed };
 }
 

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { list } from '@/tests/support/networks';
-import { found, keys, sentence, withEstimate, writes } from '../support';
+import { found, keys, sentence, withEstimate, writes } from '../helpers';
 
 const estimate = {
   days: null,

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { list } from '@/tests/support/networks';
-import { found, sentence } from '../support';
+import { found, sentence } from '../helpers';
 
 /** So many rows with a = 0.8 m and b = 1.25 m, then so many with spreads of their own. */
 function rows(copied: number, own: number): string[] {

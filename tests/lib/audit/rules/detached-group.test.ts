@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { list } from '@/tests/support/networks';
-import { found, sentence } from '../support';
+import { found, sentence } from '../helpers';
 
 describe('detached-group', () => {
   const received = list('A 1', 'B 1 <- A', 'X 1', 'C 1 <- B', 'Y 1 <- X');
@@ -52,5 +52,6 @@ describe('detached-group', () => {
     expect(found('detached-group', list('A1 1', 'B1 1 <- A1', 'X 1 <- a1', 'Y 1 <- X'))).toEqual([]);
     expect(found('detached-group', list('A1 1', 'B1 1 <- A1', 'X 1 <- GATE', 'Y 1 <- X'))).toEqual([]);
     expect(found('detached-group', list('A1 1', 'B1 1 <- A1', 'X 1 <- see plan 4', 'Y 1 <- X'))).toEqual([]);
+    expect(found('detached-group', list('A1 1', 'B1 1 <- A1', 'X1 1', 'Y 1 <- x1'))).toHaveLength(1);
   });
 });

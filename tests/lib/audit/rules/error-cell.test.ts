@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import type { ActivityList } from '@/lib/schedule/activity-list';
 import { list } from '@/tests/support/networks';
-import { found, keys, sentence, withActivity, withEstimate } from '../support';
+import { found, keys, sentence, withActivity, withEstimate } from '../helpers';
 
 const clean = list('A 1 2 3', 'B 4 5 6 <- A', 'C 1 2 3 <- B');
 

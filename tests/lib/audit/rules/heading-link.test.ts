@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { list } from '@/tests/support/networks';
-import { found, keys, keysAfter, sentence, writes } from '../support';
+import { found, keys, keysAfter, sentence, writes } from '../helpers';
 
 const rows = ['A 1 2 3', '# H1 "Piers"', 'P1 1 2 3 <- A', 'P2 1 2 3 <- P1', 'P3 1 2 3 <- P1', '# H2 "Deck"'];
 

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { list } from '@/tests/support/networks';
-import { found, sentence, withActivity } from '../support';
+import { found, sentence, withActivity } from '../helpers';
 
 describe('hidden-row', () => {
   it('finds an activity whose row is hidden', () => {

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { list } from '@/tests/support/networks';
-import { found, keys, keysAfter, sentence, withEstimate, writes } from '../support';
+import { found, keys, keysAfter, sentence, withEstimate, writes } from '../helpers';
 
 const numbersOf = (numbers: string) => list('A 1 2 3', `B ${numbers} <- A`);
 

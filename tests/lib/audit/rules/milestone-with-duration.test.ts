@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { list } from '@/tests/support/networks';
-import { found, keysAfter, sentence, writes } from '../support';
+import { found, keysAfter, sentence, writes } from '../helpers';
 
 const named = (name: string, numbers = '1 2 3') => list('A 1 2 3', `B "${name}" ${numbers} <- A`);
 

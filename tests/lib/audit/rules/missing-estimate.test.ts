@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { list } from '@/tests/support/networks';
-import { found, keys, sentence, withActivity, withEstimate, writes } from '../support';
+import { found, keys, sentence, withActivity, withEstimate, writes } from '../helpers';
 
 const ALLOWED = { 'missing-estimate': { limits: { levelAllowed: 1 } } };
 

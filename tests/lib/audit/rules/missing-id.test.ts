@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { list } from '@/tests/support/networks';
-import { found, keys, keysAfter, sentence, withActivity, writes } from '../support';
+import { found, keys, keysAfter, sentence, withActivity, writes } from '../helpers';
 
 describe('missing-id', () => {
   it('proposes the ID that is missing between the rows around it', () => {
@@ -32,6 +32,15 @@ describe('missing-id', () => {
   it('leaves alone an ID that a link elsewhere names already', () => {
     const received = list('A1 1', 'A2 1', '_ 1', 'A3 1', 'B7 1 <- A4');
     expect(writes(found('missing-id', received)[0]!.fix)).toEqual([['A4', null, 'A5']]);
+  });
+
+  it('counts back from the row below for the first row', () => {
+    const [finding] = found('missing-id', list('_ 1', 'A2 1 <- A1', 'A3 1 <- A2'));
+    expect(writes(finding!.fix)).toEqual([['A2', null, 'A1']]);
+    expect(finding!.fix?.reason).toBe(
+      "A1 is free, and comes before A2 in the list's pattern. The links of A2 name it already.",
+    );
+    expect(writes(found('missing-id', list('_ 1', 'A1 1', 'A2 1'))[0]!.fix)).toEqual([['A2', null, 'A3']]);
   });
 
   it('begins a series where no row has an ID', () => {

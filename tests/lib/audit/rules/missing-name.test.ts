@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { list } from '@/tests/support/networks';
-import { found, sentence } from '../support';
+import { found, sentence } from '../helpers';
 
 describe('missing-name', () => {
   it('finds an activity without a name in a list that names them', () => {

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { list } from '@/tests/support/networks';
-import { found, sentence, withEstimate } from '../support';
+import { found, sentence, withEstimate } from '../helpers';
 
 describe('no-spread', () => {
   it('finds each row with one value three times, and proposes nothing', () => {

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { list } from '@/tests/support/networks';
-import { found, keys, keysAfter, sentence, writes } from '../support';
+import { found, keys, keysAfter, sentence, writes } from '../helpers';
 
 describe('open-start', () => {
   it('finds each that waits for nothing but the first, and links it from there', () => {

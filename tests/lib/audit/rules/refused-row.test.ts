@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { list } from '@/tests/support/networks';
-import { found, sentence } from '../support';
+import { found, sentence } from '../helpers';
 
 describe('refused-row', () => {
   it('finds each row that was left out, with the reason', () => {

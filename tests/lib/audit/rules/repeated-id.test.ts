@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { list } from '@/tests/support/networks';
-import { found, keysAfter, sentence, withActivity, writes } from '../support';
+import { found, keysAfter, sentence, withActivity, writes } from '../helpers';
 
 const ids = (...rows: string[]) => found('repeated-id', list(...rows));
 

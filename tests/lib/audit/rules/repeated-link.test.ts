@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { list } from '@/tests/support/networks';
-import { found, keysAfter, sentence, writes } from '../support';
+import { found, keysAfter, sentence, writes } from '../helpers';
 
 describe('repeated-link', () => {
   it('removes the link with the smaller lag', () => {

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { list } from '@/tests/support/networks';
-import { found, sentence } from '../support';
+import { found, sentence } from '../helpers';
 
 describe('repeated-name', () => {
   it('is one finding a name, whatever its case and blanks', () => {

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { list } from '@/tests/support/networks';
-import { found, sentence, withEstimate } from '../support';
+import { found, sentence, withEstimate } from '../helpers';
 
 const assumed = { ...list('A 1', 'B 0 <- A', 'C 2 <- B'), unit: { value: 'day', from: 'assumed' } } as const;
 

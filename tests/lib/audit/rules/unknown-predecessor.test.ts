@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { list } from '@/tests/support/networks';
-import { found, keys, keysAfter, sentence, writes } from '../support';
+import { found, keys, keysAfter, sentence, writes } from '../helpers';
 
 const only = (...rows: string[]) => found('unknown-predecessor', list(...rows))[0]!;
 

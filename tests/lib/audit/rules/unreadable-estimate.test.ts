@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { list } from '@/tests/support/networks';
-import { found, keys, keysAfter, sentence, withEstimate, writes } from '../support';
+import { found, keys, keysAfter, sentence, withEstimate, writes } from '../helpers';
 
 const received = list('A 1 2 3', 'B 4 about5 6 <- A');
 const read = (readings: readonly number[], more = {}) =>

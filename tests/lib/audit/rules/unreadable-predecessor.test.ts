@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { list } from '@/tests/support/networks';
-import { found, keys, keysAfter, sentence, withReadings, writes } from '../support';
+import { found, keys, keysAfter, sentence, withReadings, writes } from '../helpers';
 
 const received = list('A 1 2 3', 'B 1 2 3 <- A', 'C 1 2 3 <- B, A +3 after all');
 
