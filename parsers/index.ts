@@ -10,3 +10,4 @@ export {
 } from './columns';
 export { type UnreadableCode, UnreadableFile } from './errors';
 export { readSheets } from './read-sheets';
+export { readActivityList, type SampleRow, sampleRows } from './activity-list';

@@ -1,13 +1,17 @@
 import { clean } from './text';
 import { normalId } from './id';
 
+/** A longer span of IDs is not written out. */
+const SPAN_MAX = 30;
+
 /** The IDs of a list, as the reader of predecessor cells needs to know them. */
 export class IdBook {
-  private readonly ids = new Set<string>();
+  /** Position in the list, by ID. */
+  private readonly ids = new Map<string, number>();
   /** Other ways a number that is an ID may stand in a cell: 7 under the format 000 is 007. */
   private readonly aliases = new Map<string, string>();
   private readonly shapes = new Set<string>();
-  private readonly order = new Map<string, number>();
+  private readonly inOrder: string[] = [];
   private readonly byName = new Map<string, string | null>();
   /** The most separators an ID has in it. */
   separators = 0;
@@ -19,8 +23,8 @@ export class IdBook {
   add(id: string, name = ''): void {
     if (id === '') return;
     if (!this.ids.has(id)) {
-      this.ids.add(id);
-      this.order.set(id, this.order.size);
+      this.ids.set(id, this.inOrder.length);
+      this.inOrder.push(id);
       this.shapes.add(shapeOf(id));
       this.longest = Math.max(this.longest, id.length);
       if (/[,;&\s]/.test(id))
@@ -50,10 +54,9 @@ export class IdBook {
 
   /** IDs from one to another in the order of the list, both included; empty where they stand the other way. */
   between(first: string, last: string): string[] {
-    const from = this.order.get(first) ?? 0;
-    const to = this.order.get(last) ?? -1;
-    if (to - from > 30) return [];
-    return to > from ? [...this.ids].slice(from, to + 1) : [];
+    const from = this.ids.get(first) ?? 0;
+    const to = this.ids.get(last) ?? -1;
+    return to > from && to - from <= SPAN_MAX ? this.inOrder.slice(from, to + 1) : [];
   }
 
   /** The only activity of a name. */
