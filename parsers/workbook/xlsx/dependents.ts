@@ -1,4 +1,4 @@
-import { type Area, cellCount, covers, type SheetArea } from './areas';
+import { type Area, covers, type SheetArea } from './areas';
 import type { FormulaCell } from './formulas';
 import { type NameBook, referencesOf } from './references';
 
@@ -12,45 +12,79 @@ interface Node {
   readonly formula: FormulaCell;
 }
 
-/** Ranges up to this many cells are looked up by cell, larger ones one by one. */
-const SMALL = 64;
-const COLUMNS = 16_384;
-const keyOf = (sheet: string, row: number, column: number) =>
-  `${sheet.toLowerCase()} ${row * COLUMNS + column}`;
-
 function* cellsIn(area: Area): Generator<[row: number, column: number]> {
   for (let row = area.top; row <= area.bottom; row += 1)
     for (let column = area.left; column <= area.right; column += 1) yield [row, column];
 }
 
+/** Ranges wider than this are kept by row alone. */
+const WIDE = 64;
+/** As many as a sheet has rows, and a power of two. */
+const ROWS = 1 << 20;
+
+interface Reader {
+  readonly area: Area;
+  readonly node: Node;
+}
+
+/**
+ * Which formulas read the cells of a column (or, for wide ranges, of a sheet): a segment tree over its rows,
+ * so that thousands of running totals cost no more than thousands of single cells (Bentley, 1977).
+ */
+class RowTree {
+  private readonly readers = new Map<number, Reader[]>();
+
+  add(reader: Reader): void {
+    let low = reader.area.top - 1 + ROWS;
+    let high = Math.min(reader.area.bottom, ROWS) + ROWS;
+    for (; low < high; low >>= 1, high >>= 1) {
+      if (low & 1) this.put(low++, reader);
+      if (high & 1) this.put(--high, reader);
+    }
+  }
+
+  /** The formulas that read a cell; each is given once and then forgotten. */
+  take(row: number, column: number): Node[] {
+    const found: Node[] = [];
+    for (let at = row - 1 + ROWS; at >= 1; at >>= 1) {
+      const here = this.readers.get(at);
+      if (!here) continue;
+      const left = here.filter(({ area }) => !covers(area, row, column));
+      for (const { area, node } of here) if (covers(area, row, column)) found.push(node);
+      if (left.length > 0) this.readers.set(at, left);
+      else this.readers.delete(at);
+    }
+    return found;
+  }
+
+  private put(at: number, reader: Reader): void {
+    const here = this.readers.get(at);
+    if (here) here.push(reader);
+    else this.readers.set(at, [reader]);
+  }
+}
+
 /** Which formulas read which cells. */
 class Readers {
-  private readonly byCell = new Map<string, Node[]>();
-  private large: { readonly area: SheetArea; readonly node: Node }[] = [];
+  private readonly trees = new Map<string, RowTree>();
 
-  add(area: SheetArea, node: Node): void {
-    if (cellCount(area) > SMALL) this.large.push({ area, node });
+  add({ sheet, ...area }: SheetArea, node: Node): void {
+    if (area.right - area.left >= WIDE) this.tree(sheet, 'wide').add({ area, node });
     else
-      for (const [row, column] of cellsIn(area)) {
-        const key = keyOf(area.sheet, row, column);
-        const there = this.byCell.get(key);
-        if (there) there.push(node);
-        else this.byCell.set(key, [node]);
+      for (let column = area.left; column <= area.right; column += 1) {
+        this.tree(sheet, column).add({ area, node });
       }
   }
 
-  /** The formulas that read a cell; a large range is given once and then forgotten. */
   take(sheet: string, row: number, column: number): Node[] {
-    const key = keyOf(sheet, row, column);
-    const nodes = this.byCell.get(key) ?? [];
-    this.byCell.delete(key);
-    const name = sheet.toLowerCase();
-    const hit = ({ area }: { area: SheetArea }) =>
-      area.sheet.toLowerCase() === name && covers(area, row, column);
-    if (!this.large.some(hit)) return nodes;
-    const found = this.large.filter(hit).map(({ node }) => node);
-    this.large = this.large.filter((each) => !hit(each));
-    return [...nodes, ...found];
+    return [...this.tree(sheet, column).take(row, column), ...this.tree(sheet, 'wide').take(row, column)];
+  }
+
+  private tree(sheet: string, column: number | 'wide'): RowTree {
+    const key = `${column} ${sheet.toLowerCase()}`;
+    const tree = this.trees.get(key) ?? new RowTree();
+    this.trees.set(key, tree);
+    return tree;
   }
 }
 
