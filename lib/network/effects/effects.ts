@@ -116,8 +116,8 @@ function reachOf({ working, lateStart }: Base, changes: readonly NetworkChange[]
 /** Works out anew what the changes touch and what follows from it, in order. */
 function propagate(base: Base, changes: readonly NetworkChange[], reach: number, before: Before): void {
   const { working, order, queue, lateStart } = base;
-  const { successorStart, successor, predecessor } = working.network;
-  const { earlyStart, chainVariance } = working;
+  const { successorStart, successor, successorPosition, predecessor } = working.network;
+  const { earlyStart, chainVariance, removed } = working;
   const { rank } = order;
   // Behind the last change nothing has another way to the finish than it had.
   let lastChange = -1;
@@ -141,7 +141,8 @@ function propagate(base: Base, changes: readonly NetworkChange[], reach: number,
     const latest = Math.max(was.earlyStart, earlyStart[activity]!);
     if (r > lastChange && lateStart[activity]! - latest > reach + MARGIN) continue;
     for (let k = successorStart[activity]!; k < successorStart[activity + 1]!; k++) {
-      queue.add(rank[successor[k]!]!);
+      // A removed link may run against the mended order.
+      if (removed[successorPosition[k]!] === 0) queue.add(rank[successor[k]!]!);
     }
     for (const link of working.added) if (link.from === activity) queue.add(rank[link.to]!);
   }

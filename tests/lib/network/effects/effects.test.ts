@@ -56,6 +56,12 @@ describe('the finish effect of a fix', () => {
       { kind: 'add-link', from: 2, to: 0, type: 'FS', lag: 0 },
     ]);
     expect(replaced).toEqual({ expectedDuration: 0, variance: 0 });
+    const turned = effectsOf(list('A 1', 'B 2 <- A')).effect([
+      { kind: 'remove-link', link: 0 },
+      { kind: 'add-link', from: 1, to: 0, type: 'FS', lag: 3 },
+      { kind: 'estimates', activity: 0, optimistic: 4, likely: 4, pessimistic: 4 },
+    ]);
+    expect(turned).toEqual({ expectedDuration: 6, variance: 0 });
   });
 });
 
