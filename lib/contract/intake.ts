@@ -10,6 +10,8 @@ export const detectedColumn = z.object({
   confidence: z.number(),
   /** Why it was taken for that. */
   reason: z.string(),
+  /** The unit its header states; null where it states none. */
+  unit: z.string().nullable(),
 });
 /** POST /intake: what was detected; nothing is kept. */
 export const intakeView = z.object({

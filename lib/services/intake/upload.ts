@@ -5,9 +5,10 @@ import type { Form, UploadedFile } from '@/lib/contract/transfer';
 import type { Sheet } from '@/lib/schedule/sheet';
 import { readSheets, UnreadableFile } from '@/parsers';
 
-/** A file as it was sent, with what the sender settled about reading it. */
+/** A file as it was sent, its sheets, and what the sender settled about reading it. */
 export interface Upload {
   readonly file: UploadedFile;
+  readonly sheets: readonly Sheet[];
   readonly wanted: MatchingForm;
 }
 
@@ -18,7 +19,20 @@ export function readUpload({ file, fields }: Form): Upload {
     ...(fields.columns && { columns: fromJson('columns', fields.columns[0] ?? '') }),
     ...(fields.headerRow && { headerRow: fromJson('headerRow', fields.headerRow[0] ?? '') }),
   });
-  return { file: { ...file, name: tidyName(file.name) }, wanted };
+  const sheets = refusing(() => readSheets(file.bytes, file.name));
+  return { file: { ...file, name: tidyName(file.name) }, sheets, wanted };
+}
+
+/** Reads what was sent; where it cannot be read it is refused, with the sentence that says why. */
+export function refusing<T>(read: () => T): T {
+  try {
+    return read();
+  } catch (error) {
+    if (!(error instanceof UnreadableFile)) throw error;
+    const errors = [{ path: 'file', message: error.message }];
+    if (error.code === 'too-large') throw new TooLarge(error.message, { errors });
+    throw new Invalid(error.message, { errors, members: { code: error.code } });
+  }
 }
 
 function fromJson(field: string, text: string): unknown {
@@ -36,16 +50,4 @@ function tidyName(name: string): string {
     .replace(/\p{Cc}/gu, '')
     .trim();
   return tidy.length > 200 ? `${tidy.slice(0, 150)}…${tidy.slice(-40)}` : tidy || 'file';
-}
-
-/** The file's sheets; refused with the sentence that says why it cannot be read. */
-export function readUploadedSheets({ name, bytes }: UploadedFile): Sheet[] {
-  try {
-    return readSheets(bytes, name);
-  } catch (error) {
-    if (!(error instanceof UnreadableFile)) throw error;
-    const errors = [{ path: 'file', message: error.message }];
-    if (error.code === 'too-large') throw new TooLarge(error.message, { errors });
-    throw new Invalid(error.message, { errors, members: { code: error.code } });
-  }
 }

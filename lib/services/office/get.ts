@@ -2,9 +2,9 @@ import type { OfficeContext } from '@/lib/access/context';
 import { permissionsOf, requirePermission } from '@/lib/access/permissions';
 import type { OfficeView } from '@/lib/contract/office';
 
-export function getOffice(ctx: OfficeContext): Promise<OfficeView> {
+export async function getOffice(ctx: OfficeContext): Promise<OfficeView> {
   requirePermission(ctx, 'office:read');
   const { office, user, role, contractor, readOnly } = ctx;
   const permissions = permissionsOf(role).filter((name) => !readOnly || name.endsWith(':read'));
-  return Promise.resolve({ ...office, me: { ...user, role, contractor, permissions } });
+  return { ...office, me: { ...user, role, contractor, permissions } };
 }

@@ -3,7 +3,7 @@ import type { OfficeContext } from '@/lib/access/context';
 import { requirePermission } from '@/lib/access/permissions';
 import type { RuleView } from '@/lib/contract/rule';
 
-export function listRules(ctx: OfficeContext): Promise<{ items: RuleView[] }> {
+export async function listRules(ctx: OfficeContext): Promise<{ items: RuleView[] }> {
   requirePermission(ctx, 'rules:read');
   const items = RULES.map(({ id, meta, limits }) => {
     const { title, weight, about, source } = meta;
@@ -15,5 +15,5 @@ export function listRules(ctx: OfficeContext): Promise<{ items: RuleView[] }> {
     }));
     return { id, title, weight, about, source, limits: values };
   });
-  return Promise.resolve({ items });
+  return { items };
 }

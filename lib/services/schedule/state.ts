@@ -4,6 +4,7 @@ import { analyse, compile, type Analysis, type Network } from '@/lib/network';
 import type { ActivityList, ReadingOptions } from '@/lib/schedule/activity-list';
 import type { Matching } from '@/lib/schedule/field';
 import type { Sheet } from '@/lib/schedule/sheet';
+import { refusing } from '@/lib/services/intake/upload';
 import { readActivityList } from '@/parsers';
 
 /** A submission's list in one of its states, read and computed. */
@@ -24,7 +25,7 @@ export interface Reading {
 
 /** Reads, audits and computes; lets other requests in between the steps. */
 export async function readState(sheets: readonly Sheet[], how: Reading): Promise<ReadState> {
-  const list = readActivityList(sheets, how.matching, how.reading);
+  const list = refusing(() => readActivityList(sheets, how.matching, how.reading));
   await setImmediate();
   const network = compile(list);
   const findings = runAudit(list, network);

@@ -9,7 +9,7 @@ import { firstFindings } from '@/lib/services/findings/reconcile';
 import { draftFindings } from '@/lib/services/findings/rows';
 import { found, idOf, inOffice } from '@/lib/services/in-office';
 import { settleMatching } from '@/lib/services/intake/matching';
-import { readUpload, readUploadedSheets } from '@/lib/services/intake/upload';
+import { readUpload } from '@/lib/services/intake/upload';
 import { datesOfProject } from '@/lib/services/projects/view';
 import { rememberSheets, rememberState } from '@/lib/services/schedule/load';
 import { computed, readState } from '@/lib/services/schedule/state';
@@ -29,9 +29,8 @@ export async function createSubmission(
   const projectId = idOf(path.project, 'project');
   const row: ProjectRow = found(await inOffice(ctx, (tx) => findProject(tx, projectId)), 'project');
 
-  const { file, wanted } = readUpload(form);
+  const { file, sheets, wanted } = readUpload(form);
   const digest = sha256(file.bytes);
-  const sheets = readUploadedSheets(file);
   const how = { matching: settleMatching(sheets, wanted), reading: readingOf(row) };
   const state = await readState(sheets, how);
   const audit = firstFindings(draftFindings(state));
