@@ -74,6 +74,8 @@ export interface LinkCell {
   readonly items: readonly LinkItem[];
   /** What stands between entries in this cell, or in most cells of the column where it has one entry. */
   readonly separator: string;
+  /** Cells of its row that hold the relation or the lag of its entries in a column of their own; absent without. */
+  readonly ties?: readonly { readonly cell: CellRef; readonly content: CellContent }[];
   /** The code where the cell holds an error value. */
   readonly error: string | null;
 }

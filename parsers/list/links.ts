@@ -65,6 +65,7 @@ function linkCell(
   const error = cells.error(row, gives);
   const { items, separator } =
     error === null ? readCell(cells, row, gives, text, context) : { items: [], separator: null };
+  const ties = tie && tiesOf(cells, row);
   const tied: LinkItem[] = tie
     ? tie.apply(items, row)
     : items.map(({ text: one, link, readings }) => ({ text: one, link, readings }));
@@ -76,8 +77,18 @@ function linkCell(
     content: toContent(value),
     items: tied,
     separator,
+    ...(ties && ties.length > 0 ? { ties } : {}),
     error,
   };
+}
+
+/** The relation and the lag of a row, where they stand in columns of their own. */
+function tiesOf(cells: SheetCells, row: SheetRow): NonNullable<LinkCell['ties']> {
+  return (['relation', 'lag'] as const).flatMap((field) => {
+    const cell = cells.ref(row, field);
+    const content = toContent(cells.value(row, field));
+    return cell && content !== null ? [{ cell, content }] : [];
+  });
 }
 
 function readCell(

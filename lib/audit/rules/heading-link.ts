@@ -4,7 +4,8 @@ import type { AuditContext, Defect, Rule } from '../rule';
 import { aboutActivity, at } from '../support/about';
 import { wouldLoop } from '../support/graph';
 import { type HeadingEnds, linkedHeadings } from '../support/headings';
-import { linkEdit, removeLinks, withId, writtenIn } from '../support/link-edits';
+import { linkEdit, withId } from '../support/link-edits';
+import { removeLinks, writtenIn } from '../support/link-fixes';
 import { GAO_LOGIC } from '../support/sources';
 import { called, capital, joined } from '../support/words';
 
@@ -31,7 +32,7 @@ function replacement(
   const { cell, item } = writtenIn(list, link);
   const [first, ...others] = activities.filter(({ id }) => id !== '');
   if (!link || !cell || !item || !first || activities.length > MOST) return [];
-  const entry = (activity: Activity) => withId(item.text, heading, activity.id);
+  const entry = (activity: Activity) => withId(cell, item.text, heading, activity.id);
   const which = link.fromIndex < 0 ? 'ends' : 'begins';
   const { type, lag } = link;
   return [

@@ -3,7 +3,7 @@ import type { Fix } from '@/lib/schedule/edit';
 import type { ActivityList } from '@/lib/schedule/activity-list';
 import type { AuditContext, Defect, MessageData, Rule } from '../rule';
 import { at, WHOLE_LIST } from '../support/about';
-import { removeLinks, writtenIn } from '../support/link-edits';
+import { removeLinks, writtenIn } from '../support/link-fixes';
 import { otherCuts } from '../support/loop-cuts';
 import { GAO_LOGIC } from '../support/sources';
 import { called, capital, counted, joined, listIn } from '../support/words';

@@ -16,26 +16,26 @@ import { called, capital, joined, joinedIn } from '../support/words';
 
 const isLikely = ({ parts }: EstimateCell) => parts.includes('likely');
 
-/** Columns that the list does not have: one finding, not one a row. */
+/** A column that a sheet does not have: one finding, not one a row. */
 function missingColumns(list: ActivityList): Defect[] {
-  const [first] = list.activities;
-  if (!first) return [];
-  const absent = estimateCells(first, list).filter(({ name, estimate }) => {
-    return estimate.cell === null && estimate.problem === 'empty' && name !== '';
+  const bySheet = new Map<string, Activity>();
+  for (const activity of list.activities) {
+    if (!bySheet.has(activity.sheet)) bySheet.set(activity.sheet, activity);
+  }
+  return [...bySheet].flatMap(([sheet, first]): Defect[] => {
+    const absent = estimateCells(first, list).filter(({ estimate }) => estimate.cell === null);
+    if (absent.length === 0) return [];
+    return [
+      {
+        about: `${sheet}|${absent.map(({ key }) => key).join(' ')}`,
+        message: 'column',
+        data: { sheet, names: absent.map(({ name }) => name), count: absent.length },
+        weight: absent.some(isLikely) ? 'blocks' : 'distorts',
+        ...WHOLE_LIST,
+        sheet,
+      },
+    ];
   });
-  const everywhere = absent.filter((cell) =>
-    list.activities.every((activity) => cell.parts.every((part) => activity[part].cell === null)),
-  );
-  if (everywhere.length === 0) return [];
-  return [
-    {
-      about: `column ${everywhere.map(({ key }) => key).join(' ')}`,
-      message: 'column',
-      data: { names: everywhere.map(({ name }) => name), count: everywhere.length },
-      weight: everywhere.some(isLikely) ? 'blocks' : 'distorts',
-      ...WHOLE_LIST,
-    },
-  ];
 }
 
 /** a = m = b from what is there: the likely estimate, or the only one. */
@@ -89,7 +89,7 @@ export const rule: Rule = {
       all: (data) => `${capital(data.id)} has links, and none of the three estimates.`,
       duration: (data) => `${capital(data.id)} has no duration.`,
       column: (data) =>
-        `The list has no column for the ${joinedIn(data, 'names')} ${data.count === 1 ? 'estimate' : 'estimates'}.`,
+        `Sheet “${data.sheet}” has no column for the ${joinedIn(data, 'names')} ${data.count === 1 ? 'estimate' : 'estimates'}.`,
     },
   },
   limits: {

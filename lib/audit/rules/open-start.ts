@@ -1,6 +1,6 @@
 import type { Rule } from '../rule';
 import { aboutActivity, at } from '../support/about';
-import { addLink, linkColumnCell } from '../support/link-edits';
+import { addLink, linkColumnCell } from '../support/link-fixes';
 import { openEnds } from '../support/open-ends';
 import { DCMA_LOGIC, GAO_LOGIC } from '../support/sources';
 import { called } from '../support/words';

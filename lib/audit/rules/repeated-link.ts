@@ -3,7 +3,7 @@ import type { ActivityList } from '@/lib/schedule/activity-list';
 import { RELATION_NAMES } from '@/lib/schedule/relation';
 import type { Rule } from '../rule';
 import { at } from '../support/about';
-import { removeLinks, writtenIn } from '../support/link-edits';
+import { removeLinks, writtenIn } from '../support/link-fixes';
 import { GAO_LOGIC } from '../support/sources';
 import { amount, called, capital } from '../support/words';
 

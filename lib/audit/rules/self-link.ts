@@ -1,6 +1,6 @@
 import type { Rule } from '../rule';
 import { aboutActivity, at } from '../support/about';
-import { removeLinks, writtenIn } from '../support/link-edits';
+import { removeLinks, writtenIn } from '../support/link-fixes';
 import { GAO_LOGIC } from '../support/sources';
 import { called, capital } from '../support/words';
 

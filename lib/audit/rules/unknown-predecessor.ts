@@ -4,7 +4,8 @@ import type { ActivityList } from '@/lib/schedule/activity-list';
 import type { MessageData, Rule } from '../rule';
 import { aboutActivity, at } from '../support/about';
 import { freeIdFix } from '../support/free-id-fix';
-import { linkEdit, removeLinks, withId, writtenIn } from '../support/link-edits';
+import { linkEdit, withId } from '../support/link-edits';
+import { removeLinks, writtenIn } from '../support/link-fixes';
 import type { Nearness } from '../support/nearest';
 import { PRACTICE } from '../support/sources';
 import { endsWith, type UnknownLink, unknownLinks } from '../support/unknown-links';
@@ -36,7 +37,7 @@ function nearFixes(list: ActivityList, unknown: UnknownLink): Fix[] {
   const { near, how, wanted, index, link } = unknown;
   return near.slice(0, OFFERED).map((activity) => {
     const edit: CellEdit = linkEdit(cell, [
-      { op: 'replace', item: item.text, with: withId(item.text, wanted, activity.id) },
+      { op: 'replace', item: item.text, with: withId(cell, item.text, wanted, activity.id) },
     ]);
     const [from, to] = endsWith(unknown, activity.index);
     const alone = near.length === 1;

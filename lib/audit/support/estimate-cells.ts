@@ -25,8 +25,16 @@ export interface EstimateCell {
   readonly estimate: Estimate;
 }
 
+const isOneCell = ({ optimistic, likely, pessimistic }: Activity) =>
+  likely.cell !== null &&
+  [optimistic, pessimistic].every(({ cell }) => cell !== null && cell.column === likely.cell?.column);
+
+/** True where one column gives all three: in the whole list, or on the sheet of this activity. */
+export const hasOneDuration = (activity: Activity, list: ActivityList) =>
+  list.singleDuration || isOneCell(activity);
+
 export function estimateCells(activity: Activity, list: ActivityList): EstimateCell[] {
-  if (list.singleDuration) {
+  if (hasOneDuration(activity, list)) {
     return [{ parts: PARTS, key: 'duration', name: '', estimate: activity.likely }];
   }
   return PARTS.map((part) => ({

@@ -18,12 +18,13 @@ function linksGained(list: ActivityList, activity: Activity, { awaitedBy }: Free
   });
 }
 
-/** A number where the IDs around it are kept as numbers. */
+/** A number where the cell keeps one (its format fills it up with zeros), or the cells around an empty one do. */
 function contentOf(list: ActivityList, activity: Activity, id: string): CellContent {
-  const neighbours = [activity, list.activities[activity.index - 1], list.activities[activity.index + 1]];
-  const known = neighbours.find((neighbour) => neighbour !== undefined && neighbour.idContent !== null);
-  const numeric = typeof known?.idContent === 'number' && String(Number(id)) === id;
-  return numeric ? Number(id) : id;
+  if (typeof activity.idContent === 'number' && /^\d+$/.test(id)) return Number(id);
+  const beside = [list.activities[activity.index - 1], list.activities[activity.index + 1]];
+  const known = beside.find((neighbour) => neighbour !== undefined && neighbour.idContent !== null);
+  const numeric = activity.idContent === null && typeof known?.idContent === 'number';
+  return numeric && String(Number(id)) === id ? Number(id) : id;
 }
 
 function placeOf({ id, after, before }: FreeId): string {

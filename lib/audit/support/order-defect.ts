@@ -3,7 +3,15 @@ import type { ActivityList } from '@/lib/schedule/activity-list';
 import type { Fix } from '@/lib/schedule/edit';
 import type { Defect, Limit } from '../rule';
 import { aboutActivity, at } from './about';
-import { estimateFix, LETTERS, PARTS, type Part, threeOf, type Wanted } from './estimate-cells';
+import {
+  estimateFix,
+  hasOneDuration,
+  LETTERS,
+  PARTS,
+  type Part,
+  threeOf,
+  type Wanted,
+} from './estimate-cells';
 import { type Reordering, reorderings } from './reorder';
 import { amount, called, joined, shown } from './words';
 import { daysIn } from './written';
@@ -41,7 +49,7 @@ function toFix(list: ActivityList, activity: Activity, way: Reordering): Fix[] {
 
 /** True where the order of the three can be spoken of: a sign, a gap or a cell not read is another rule's. */
 export function isComparable(list: ActivityList, activity: Activity): boolean {
-  return !list.singleDuration && PARTS.every((part) => (threeOf(activity)[part] ?? 0) >= 0);
+  return !hasOneDuration(activity, list) && PARTS.every((part) => (threeOf(activity)[part] ?? 0) >= 0);
 }
 
 /** A finding about two estimates that stand the wrong way round. */

@@ -65,7 +65,7 @@ describe('missing-estimate', () => {
     const [finding, ...more] = found('missing-estimate', received);
     expect(more).toEqual([]);
     expect(finding).toMatchObject({ weight: 'distorts', cell: null, row: null, activityId: null });
-    expect(sentence(finding!)).toBe('The list has no column for the optimistic estimate.');
+    expect(sentence(finding!)).toBe('Sheet “Activities” has no column for the optimistic estimate.');
   });
 
   it('leaves a cell that holds something to the rules for that', () => {

@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import { linkEdit, removeLinks, withId } from '@/lib/audit/support/link-edits';
+import { linkEdit, withId } from '@/lib/audit/support/link-edits';
+import { removeLinks } from '@/lib/audit/support/link-fixes';
 import type { LinkCell } from '@/lib/schedule/activity';
 import { list } from '@/tests/support/networks';
 
@@ -65,7 +66,7 @@ describe('removeLinks', () => {
 
 describe('withId', () => {
   it('keeps the relation and the lag as written', () => {
-    expect(withId('Z9 : SS + 2d', 'Z9', 'Z6')).toBe('Z6 : SS + 2d');
-    expect(withId('z 9', 'Z9', 'Z6')).toBe('Z6');
+    expect(withId(cell('', []), 'Z9 : SS + 2d', 'Z9', 'Z6')).toBe('Z6 : SS + 2d');
+    expect(withId(cell('', []), 'z 9', 'Z9', 'Z6')).toBe('Z6');
   });
 });
