@@ -53,7 +53,14 @@ export function changesByCell(
   return (cell) => map.get(keyOf(cell)) ?? [];
 }
 
-const shown = (content: CellContent) => (content === null ? 'empty' : `“${content}”`);
+/** A note shows this much of a long text; the list of changes has all of it. */
+const NOTE_LENGTH = 500;
+
+function shown(content: CellContent): string {
+  const text = String(content ?? '');
+  if (content === null) return 'empty';
+  return text.length > NOTE_LENGTH ? `“${text.slice(0, NOTE_LENGTH)}…”` : `“${text}”`;
+}
 
 /** What a cell's note says. */
 export function noteText(cell: ChangedCell, changes: readonly ListedChange[]): string {

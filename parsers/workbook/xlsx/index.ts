@@ -10,6 +10,7 @@ import { addRelation, declareType, freeName, isOfType, readBytes, writeBytes, wr
 import { openSheet, type SheetMarkup } from './sheet-markup';
 import { patchCells } from './sheet-patch';
 import { emptyStyles, Styles } from './styles';
+import { renameTableColumns } from './table-headings';
 import {
   addSheet,
   askForCalculation,
@@ -78,6 +79,7 @@ export function patchXlsx(
     waiting += plan.stale;
     if (plan.actions.size === 0) continue;
     const { markup, part } = sheet;
+    renameTableColumns(pack, part, sheet.cells);
     const splices = patchCells(markup, plan.actions, (base, to) => styles.corrected(base, to));
     if (sheet.cells.length > 0) {
       const notes = sheet.cells.map((cell) => ({ ...cell, text: noteText(cell, changesOf(cell)) }));

@@ -88,6 +88,14 @@ describe('a workbook with a chart, a picture, a pivot table, a table, notes, val
     expect(of('xl/worksheets/sheet4.xml')).toContain(`location="'Works'!C7"`);
   });
 
+  it('keeps the headings of a table the same in its cells and in its part', () => {
+    const heading = { sheet: 'Works', cell: 'F3', from: 'After', to: 'Waits for' };
+    const renamed = giveBack({ bytes, fileName: 'x.xlsx', corrections: [heading], changes: [] });
+    const table = partsOf(renamed.bytes).get('xl/tables/table1.xml')?.content;
+    expect(table).toContain('name="Waits for"');
+    expect(table?.replace('Waits for', 'After')).toBe(before.get('xl/tables/table1.xml')?.content);
+  });
+
   it('can be corrected again', () => {
     const again = giveBack({
       bytes: given.bytes,
