@@ -110,7 +110,7 @@ export function FindingsBoard({ office, view: submission, findings }: FindingsBo
           <Bench
             key={selected.id}
             office={office}
-            submission={submission.id}
+            submission={submission}
             finding={selected}
             ofRule={ofRule}
             steps={steps}

@@ -18,6 +18,16 @@ export function skippedSentence({ skipped }: Pick<CorrectionResult, 'skipped'>):
   return `${count} left out. ${reasons.slice(0, 3).join(' ')}${reasons.length > 3 ? ' …' : ''}`;
 }
 
+/** After an undo: which other corrections no longer fit what the cells hold now, and why. */
+export function inapplicableSentence({ inapplicable }: Pick<CorrectionResult, 'inapplicable'>): string {
+  const reasons = [...new Set(inapplicable.map(({ reason }) => reason))];
+  const count =
+    inapplicable.length === 1
+      ? 'One other correction no longer applies.'
+      : `${String(inapplicable.length)} other corrections no longer apply.`;
+  return `${count} ${reasons.slice(0, 3).join(' ')}`;
+}
+
 /**
  * The correction in force that settles a finding: by its adopted fix, else the latest made for it by hand,
  * else the latest that changed its cell.

@@ -8,12 +8,15 @@ import { ClientError } from '@/lib/client/error';
 import { adoptedFix } from '@/lib/client/findings';
 import type { CorrectionResult, FindingView, FixView } from '@/lib/contract/submission';
 import { useFormat } from '@/components/ui/locale';
-import { correctionOf, outcomeSentence, skippedSentence } from './outcome';
+import { latestDeed } from '@/lib/client/record';
+import { correctionOf, inapplicableSentence, outcomeSentence, skippedSentence } from './outcome';
 
 /** What went wrong with a step, beside the finding it was for; null: with one that was for none. */
 export interface Trouble {
   readonly finding: string | null;
   readonly error: unknown;
+  /** Where someone else was first: who it was and what they did, as far as it is known. */
+  readonly first: string | null;
 }
 
 /** The steps one can take on findings, what came of the last one, and the way back. */
@@ -40,7 +43,8 @@ export function useSteps(office: string, submission: string) {
     try {
       return await send();
     } catch (error) {
-      setTrouble({ finding, error });
+      const first = wasStale(error) ? await latestDeed(office, submission) : null;
+      setTrouble({ finding, error, first });
       return null;
     } finally {
       underWay.current.delete(name);
@@ -54,6 +58,7 @@ export function useSteps(office: string, submission: string) {
     if (!result) return false;
     setMade((all) => all.filter((known) => known !== batch));
     setSaid(outcomeSentence('Undone.', result, format));
+    if (result.inapplicable.length > 0) toast({ text: inapplicableSentence(result), tone: 'trouble' });
     return true;
   };
 
@@ -109,7 +114,7 @@ export function useSteps(office: string, submission: string) {
         if (correction) await undo(correction.id, finding.id);
         else toast('There is no correction of this finding to undo.');
       } catch (error) {
-        setTrouble({ finding: finding.id, error });
+        setTrouble({ finding: finding.id, error, first: null });
       }
     },
     /** The last step made on this page; false where there is none. */
@@ -123,7 +128,7 @@ export function useSteps(office: string, submission: string) {
 }
 export type Steps = ReturnType<typeof useSteps>;
 
-/** Whether a step was refused because someone else changed the submission first. */
+/** Whether a step was refused because someone else changed the submission first: the refusal then names its version. */
 export function wasStale(error: unknown): boolean {
-  return error instanceof ClientError && error.status === 409;
+  return error instanceof ClientError && error.status === 409 && typeof error.body.version === 'number';
 }

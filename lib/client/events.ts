@@ -3,11 +3,11 @@
 import { useIsMutating, useQueryClient, type QueryClient } from '@tanstack/react-query';
 import { useEffect, useEffectEvent, useRef, useState } from 'react';
 import type { z } from 'zod';
-import type { RecordEntryView, submissionEvent, SubmissionView } from '@/lib/contract/submission';
+import type { submissionEvent, SubmissionView } from '@/lib/contract/submission';
 import { commentsKey } from './comments';
 import { correctionsKey, refetchAll } from './corrections';
 import { keys } from './keys';
-import { fetchRecord } from './record';
+import { latestDeed } from './record';
 import { submissionPath } from './submissions';
 
 export type SubmissionEvent = z.infer<typeof submissionEvent>;
@@ -154,26 +154,11 @@ async function lookForChanges(client: QueryClient, office: string, submission: s
   if (knownVersion(client, office, submission) !== before) await refetchAll(client, office, submission);
 }
 
-/** The record has the sentence; without it the news is told in general words. */
 async function tellLatest(
   office: string,
   submission: string,
   tell: (sentence: string) => void,
 ): Promise<void> {
-  const latest = await fetchRecord(office, submission).then(
-    ({ items }) =>
-      items.reduce<RecordEntryView | null>(
-        (top, entry) => (top && top.sequence > entry.sequence ? top : entry),
-        null,
-      ),
-    () => null,
-  );
-  tell(latest ? newsSentence(latest) : 'Someone else changed this submission. What you see is new.');
-}
-
-/** "Piet Ostra adopted 3 fixes. What you see is new.", from an entry whose sentence begins with its verb. */
-export function newsSentence(entry: RecordEntryView): string {
-  const said = entry.summary.replace(/[.\s]+$/, '');
-  const deed = /^Rev \d/.test(said) ? `: ${said}` : ` ${said.charAt(0).toLowerCase()}${said.slice(1)}`;
-  return `${entry.by}${deed}. What you see is new.`;
+  const deed = await latestDeed(office, submission);
+  tell(`${deed ?? 'Someone else changed this submission.'} What you see is new.`);
 }

@@ -3,19 +3,20 @@
 import Link from 'next/link';
 import { FindingComments } from '@/components/comments/finding-comments';
 import { WeightMark } from '@/components/ui/weight-mark';
-import type { FindingView } from '@/lib/contract/submission';
+import type { FindingView, SubmissionView } from '@/lib/contract/submission';
 import { aboutText } from '../place-text';
 import type { Steps } from '../use-steps';
 import { BenchSection } from './bench-section';
 import { CellsSection } from './cells-section';
 import { CorrectedFix } from './corrected-fix';
+import { closedReason } from './fix-choice';
 import { OpenFix } from './open-fix';
 import { TroubleNote } from './trouble-note';
 import { useBench } from './use-bench';
 
 interface BenchProps {
   office: string;
-  submission: string;
+  submission: SubmissionView;
   finding: FindingView;
   /** How many fixes of its rule could be adopted in one step. */
   ofRule: number;
@@ -25,7 +26,8 @@ interface BenchProps {
 
 /** The selected finding: what is wrong, where, what can be done, by which rule, and what was said. Keyed by finding. */
 export function Bench({ office, submission, finding, ofRule, steps, onAdoptRule }: BenchProps) {
-  const bench = useBench({ office, submission, finding, steps });
+  const closed = closedReason(submission.status);
+  const bench = useBench({ office, submission: submission.id, closed, finding, steps });
   return (
     <>
       <p className="mb-1 flex flex-wrap gap-x-3 text-slate">
@@ -41,20 +43,23 @@ export function Bench({ office, submission, finding, ofRule, steps, onAdoptRule 
         {steps.trouble?.finding === finding.id && (
           <TroubleNote trouble={steps.trouble} onDismiss={steps.forgetTrouble} />
         )}
+        {closed && <p className="mb-2 text-slate">{closed}</p>}
         {bench.open ? (
           <OpenFix
             finding={finding}
             bench={bench}
             ofRule={ofRule}
             busy={steps.busy}
+            closed={closed !== null}
             onAdoptRule={onAdoptRule}
           />
         ) : (
           <CorrectedFix
             office={office}
-            submission={submission}
+            submission={submission.id}
             finding={finding}
             busy={steps.busy}
+            mayUndo={bench.may('corrections:undo')}
             lastBatch={steps.last}
             onUndo={() => void steps.undoFinding(finding)}
           />
@@ -66,7 +71,12 @@ export function Bench({ office, submission, finding, ofRule, steps, onAdoptRule 
         </p>
       </BenchSection>
       <BenchSection title="Comments">
-        <FindingComments office={office} submission={submission} finding={finding.id} field={bench.comment} />
+        <FindingComments
+          office={office}
+          submission={submission.id}
+          finding={finding.id}
+          field={bench.comment}
+        />
       </BenchSection>
     </>
   );

@@ -1,6 +1,5 @@
 'use client';
 
-import { useMay } from '@/components/shell/office-context';
 import { Button } from '@/components/ui/button';
 import { DateText } from '@/components/ui/date-text';
 import { useCorrections } from '@/lib/client/corrections';
@@ -15,14 +14,15 @@ interface CorrectedFixProps {
   submission: string;
   finding: FindingView;
   busy: boolean;
+  mayUndo: boolean;
   /** The batch that the key for undoing would take back. */
   lastBatch: string | null;
   onUndo: () => void;
 }
 
 /** What corrected a finding, who did it and when, with the way back. */
-export function CorrectedFix({ office, submission, finding, busy, lastBatch, onUndo }: CorrectedFixProps) {
-  const mayUndo = useMay()('corrections:undo');
+export function CorrectedFix(props: CorrectedFixProps) {
+  const { office, submission, finding, busy, mayUndo, lastBatch, onUndo } = props;
   const corrections = useCorrections(office, submission, true);
   const fix = adoptedFix(finding);
   const correction = correctionOf(corrections.data ?? [], finding, fix);

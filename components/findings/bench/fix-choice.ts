@@ -1,5 +1,5 @@
 import { adoptedFix, fixesOf } from '@/lib/client/findings';
-import type { FindingView, FixView } from '@/lib/contract/submission';
+import type { FindingView, FixView, SubmissionView } from '@/lib/contract/submission';
 
 /** By hand: in place of a fix's id. */
 export const BY_HAND = 'by-hand';
@@ -35,4 +35,10 @@ export function adoptable(findings: readonly FindingView[], rule: string): FixVi
       ? [finding.fix]
       : [],
   );
+}
+
+/** Why a submission takes no corrections any more; null where it does. */
+export function closedReason(status: SubmissionView['status']): string | null {
+  if (status === 'superseded') return 'A later revision has superseded this one, so it is corrected no more.';
+  return status === 'accepted' ? 'This revision is accepted, so it is corrected no more.' : null;
 }

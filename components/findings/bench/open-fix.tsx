@@ -12,11 +12,13 @@ interface OpenFixProps {
   bench: BenchState;
   ofRule: number;
   busy: boolean;
+  /** Nothing can be corrected here any more. */
+  closed: boolean;
   onAdoptRule: () => void;
 }
 
 /** What can be done about a finding that is not settled yet. */
-export function OpenFix({ finding, bench, ofRule, busy, onAdoptRule }: OpenFixProps) {
+export function OpenFix({ finding, bench, ofRule, busy, closed, onAdoptRule }: OpenFixProps) {
   const { cells, piece, option, fix, hand } = bench;
   return (
     <>
@@ -47,14 +49,16 @@ export function OpenFix({ finding, bench, ofRule, busy, onAdoptRule }: OpenFixPr
           )
         }
       />
-      <BenchActions
-        fix={option === BY_HAND ? null : fix}
-        ofRule={ofRule}
-        busy={busy}
-        onAdopt={bench.adopt}
-        onDecline={bench.decline}
-        onAdoptRule={onAdoptRule}
-      />
+      {!closed && (
+        <BenchActions
+          fix={option === BY_HAND ? null : fix}
+          ofRule={ofRule}
+          busy={busy}
+          onAdopt={bench.adopt}
+          onDecline={bench.decline}
+          onAdoptRule={onAdoptRule}
+        />
+      )}
     </>
   );
 }

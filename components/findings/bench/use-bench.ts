@@ -15,6 +15,8 @@ import { MOST_ROWS, proposedTexts, rowsToShow } from './sheet-cells';
 interface BenchPlace {
   office: string;
   submission: string;
+  /** Why nothing can be corrected here any more; null where it can. */
+  closed: string | null;
   finding: FindingView;
   steps: Steps;
 }
@@ -22,8 +24,9 @@ interface BenchPlace {
 const NOTHING: ReadonlyMap<string, string> = new Map();
 
 /** What is chosen on the bench, the cells it is about, and the keys that act on it. */
-export function useBench({ office, submission, finding, steps }: BenchPlace) {
-  const may = useMay();
+export function useBench({ office, submission, closed, finding, steps }: BenchPlace) {
+  const mayEver = useMay();
+  const may = (permission: string) => closed === null && mayEver(permission);
   const [picked, setPicked] = useState<string | null>(null);
   const hand = useHandDraft(finding.id);
   const firstCell = useRef<HTMLInputElement>(null);
@@ -66,6 +69,7 @@ export function useBench({ office, submission, finding, steps }: BenchPlace) {
   const proposed = option === BY_HAND ? hand.typed : proposedTexts(edits, finding.sheet ?? '');
   return {
     open,
+    may,
     option,
     choose,
     fix,

@@ -1,5 +1,5 @@
 import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
-import { isNews, newsSentence, readEvent, subscribe, type SubmissionEvent } from '@/lib/client/events';
+import { isNews, readEvent, subscribe, type SubmissionEvent } from '@/lib/client/events';
 
 describe('an event', () => {
   it('is read from its data, and anything else is passed over', () => {
@@ -18,16 +18,6 @@ describe('an event', () => {
     expect(isNews({ kind: 'status' }, 7)).toBe(true);
     expect(isNews({ kind: 'comment', version: 7 }, 7)).toBe(true);
   });
-});
-
-it('tells what someone did as a sentence about them', () => {
-  const entry = { sequence: 4, at: '2027-03-09T10:12:00.000Z', by: 'Piet Ostra', verb: 'adopt', hash: 'ab' };
-  expect(newsSentence({ ...entry, summary: 'Adopted 3 fixes in 4 cells.' })).toBe(
-    'Piet Ostra adopted 3 fixes in 4 cells. What you see is new.',
-  );
-  expect(newsSentence({ ...entry, summary: 'Rev 2 came in and supersedes this one.' })).toBe(
-    'Piet Ostra: Rev 2 came in and supersedes this one. What you see is new.',
-  );
 });
 
 /** Stands in for the browser's EventSource; the test opens, feeds and breaks it. */
