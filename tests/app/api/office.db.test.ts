@@ -70,7 +70,7 @@ describe('who is asking', () => {
   it('changes nothing from another site’s page', async () => {
     const cookie = await sessionCookie(cast.administrator.user);
     const body = { name: 'Smugglers' };
-    const attempts = [
+    const attempts: Record<string, string>[] = [
       { origin: 'https://elsewhere.example' },
       { 'sec-fetch-site': 'cross-site' },
       { 'sec-fetch-site': 'same-site', origin: 'http://plumbrow.test' },
