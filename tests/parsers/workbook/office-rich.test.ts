@@ -2,7 +2,7 @@ import { readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
 import { readSheets } from '@/parsers';
 import { giveBack } from '@/parsers/workbook';
-import { compareParts, partsOf } from './packages';
+import { compareParts, malformedParts, partsOf } from './packages';
 
 const bytes = new Uint8Array(readFileSync('fixtures/uploads/workbooks/office-rich.xlsx'));
 const edits = [
@@ -74,6 +74,10 @@ describe('a workbook with a chart, a picture, a pivot table, a table, notes, val
       /The two were exchanged\. Rule: likely-below-optimistic\. \(I\. Okafor, 12 Mar 2027, 09:30 UTC\)/,
     );
     expect(of('xl/drawings/vmlDrawing1.vml').match(/<x:Row>/g)).toHaveLength(4);
+  });
+
+  it('is well-formed in every part', () => {
+    expect(malformedParts(given.bytes)).toEqual([]);
   });
 
   it('lists the changes on a sheet of its own, linked to the cells', () => {

@@ -1,4 +1,5 @@
 import { zipSync } from 'fflate';
+import { SaxesParser } from 'saxes';
 import { openZip, packedBytes, unpack } from '@/parsers/zip';
 
 export interface PartBytes {
@@ -31,6 +32,18 @@ export function compareParts(before: Uint8Array, after: Uint8Array) {
     added: [...now.keys()].filter((name) => !old.has(name)),
     gone: [...old.keys()].filter((name) => !now.has(name)),
   };
+}
+
+/** Names of the parts that are not well-formed, each with what is wrong. */
+export function malformedParts(bytes: Uint8Array): string[] {
+  return [...partsOf(bytes)].flatMap(([name, { content }]) => {
+    if (!/\.(?:xml|rels|vml)$/.test(name)) return [];
+    const faults: string[] = [];
+    const parser = new SaxesParser({ xmlns: true });
+    parser.on('error', (error) => void faults.push(`${name}: ${error.message}`));
+    parser.write(content).close();
+    return faults;
+  });
 }
 
 const MAIN = 'http://schemas.openxmlformats.org/spreadsheetml/2006/main';

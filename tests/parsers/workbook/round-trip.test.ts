@@ -5,7 +5,7 @@ import { cellAddress, columnLetters } from '@/lib/schedule/cell';
 import type { CellContent, Sheet } from '@/lib/schedule/sheet';
 import { readSheets } from '@/parsers';
 import { giveBack } from '@/parsers/workbook';
-import { makeWorkbook } from './packages';
+import { makeWorkbook, malformedParts } from './packages';
 
 /** What the cells of a sheet show, by address; formulas are left out, since they may be calculated anew. */
 function contents(sheet: Sheet | undefined, formulas: ReadonlyMap<string, unknown>): Map<string, string> {
@@ -74,6 +74,7 @@ describe('a workbook', () => {
         expect(contents(again[0], formulas)).toEqual(contents(wanted, formulas));
         expect([...(again[0]?.formulas.keys() ?? [])].sort()).toEqual([...formulas.keys()].sort());
         expect(again[1]).toEqual(other);
+        expect(malformedParts(after)).toEqual([]);
       }),
       { numRuns: 300 },
     );

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { readSheets } from '@/parsers';
 import { edit, give, sheetXml, withList } from '../giving';
-import { compareParts, makeWorkbook, partsOf } from '../packages';
+import { compareParts, malformedParts, makeWorkbook, partsOf } from '../packages';
 
 describe('dialects', () => {
   it('changes parts whose elements bear a prefix', () => {
@@ -17,6 +17,7 @@ describe('dialects', () => {
     expect(sheetXml(bytes)).toContain(
       '<x:c r="A1" s="1" t="inlineStr"><x:is><x:t xml:space="preserve">x</x:t></x:is></x:c>',
     );
+    expect(malformedParts(bytes)).toEqual([]);
     expect(sheetXml(bytes)).toMatch(/<x:legacyDrawing [^>]*r:id="rId2"\/><\/x:worksheet>/);
     const after = partsOf(bytes).get('xl/styles.xml')?.content ?? '';
     expect(after).toMatch(/<x:fills count="3">.*<x:borders count="1">.*<x:cellXfs count="\d">/);
