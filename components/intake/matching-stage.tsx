@@ -73,8 +73,6 @@ function Standing({ stage, intake }: Props) {
   const { file, view, draft, rereading, trouble } = stage;
   const { slug } = useOfficeView();
   const missing = obstacles(draft);
-  const problems = rereading ? [] : view.problems;
-  const sentences = [...new Set([...missing, ...problems])];
   return (
     <div className="border border-l-4 border-hair border-l-cord bg-leaf p-4">
       {trouble && (
@@ -87,33 +85,13 @@ function Standing({ stage, intake }: Props) {
           )}
         </p>
       )}
-      {sentences.length > 0 ? (
-        <>
-          <p className="text-base font-semibold">Look at the columns before it is handed in</p>
-          <ul className="mt-1 max-w-prose list-inside list-['–_']">
-            {sentences.map((sentence) => (
-              <li key={sentence}>{sentence}</li>
-            ))}
-          </ul>
-        </>
-      ) : (
-        <>
-          <p className="text-base font-semibold">Is this how the list is meant?</p>
-          <p className="max-w-prose text-slate">
-            Check the columns and the rows below. Handing it in makes a revision; the file itself is kept as
-            it came.
-          </p>
-        </>
-      )}
+      <Question missing={missing} doubts={rereading ? [] : view.problems} />
       <div className="mt-3 flex flex-wrap gap-2">
         <Button
           disabled={missing.length > 0}
           busy={rereading}
           onClick={() =>
-            void intake.send(file, view, draft, {
-              straight: false,
-              again: Boolean(trouble?.existing),
-            })
+            void intake.send(file, view, draft, { straight: false, again: Boolean(trouble?.existing) })
           }
         >
           {trouble?.existing ? 'Hand it in all the same' : 'Hand it in'}
@@ -123,6 +101,46 @@ function Standing({ stage, intake }: Props) {
         </Button>
       </div>
     </div>
+  );
+}
+
+/** What must be settled; else what was in doubt and now stands as it is left; else whether all of it is right. */
+function Question({ missing, doubts }: { missing: readonly string[]; doubts: readonly string[] }) {
+  if (missing.length > 0) {
+    return (
+      <>
+        <p className="text-base font-semibold">Some columns are still to be settled</p>
+        <Sentences of={missing} />
+      </>
+    );
+  }
+  if (doubts.length > 0) {
+    return (
+      <>
+        <p className="text-base font-semibold">Are the columns right? They could not be told for sure.</p>
+        <Sentences of={doubts} />
+        <p className="text-slate">The list is read with what you leave above the columns.</p>
+      </>
+    );
+  }
+  return (
+    <>
+      <p className="text-base font-semibold">Is this how the list is meant?</p>
+      <p className="max-w-prose text-slate">
+        Check the columns and the rows below. Handing it in makes a revision; the file itself is kept as it
+        came.
+      </p>
+    </>
+  );
+}
+
+function Sentences({ of }: { of: readonly string[] }) {
+  return (
+    <ul className="mt-1 max-w-prose list-inside list-['–_']">
+      {of.map((sentence) => (
+        <li key={sentence}>{sentence}</li>
+      ))}
+    </ul>
   );
 }
 

@@ -29,13 +29,13 @@ export function SampleTable({ sample, stale }: { sample: readonly Row[]; stale: 
         <thead>
           <tr>
             <Th numeric>Row</Th>
-            <Th>Read as</Th>
+            <Th className="whitespace-nowrap">Read as</Th>
             <Th>ID</Th>
             <Th className="w-full">Name</Th>
             <Th numeric>a</Th>
             <Th numeric>m</Th>
             <Th numeric>b</Th>
-            <Th>Waits for</Th>
+            <Th className="whitespace-nowrap">Waits for</Th>
           </tr>
         </thead>
         <tbody>
