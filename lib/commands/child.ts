@@ -21,6 +21,8 @@ export const PROGRAMS = {
 } as const;
 export type Program = keyof typeof PROGRAMS;
 
+const PLAIN = { NO_COLOR: '1', FORCE_COLOR: '0' };
+
 /** Runs a package's program to its end in a process group of its own, which `ending` ends; answers its exit code. */
 export async function runProgram(
   ending: Ending,
@@ -29,7 +31,7 @@ export async function runProgram(
   options: ChildOptions = {},
 ): Promise<number> {
   const child = spawn(process.execPath, [join('node_modules', PROGRAMS[program]), ...args], {
-    env: { ...process.env, ...options.env },
+    env: { ...process.env, ...(options.onLine ? PLAIN : {}), ...options.env },
     detached: true,
     stdio: options.onLine ? ['ignore', 'pipe', 'pipe'] : ['ignore', 'inherit', 'inherit'],
   });

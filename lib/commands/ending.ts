@@ -56,6 +56,7 @@ export async function untilEnded(
     interrupt(stopping);
   };
   for (const signal of SIGNALS) process.on(signal, heed);
+  const parentWatch = watchParent(() => heed('SIGHUP'));
   // The terminal is gone with SIGHUP: writing to it must not end us before the children are.
   for (const stream of [process.stdout, process.stderr]) stream.on('error', () => undefined);
   const working = work(ending, interrupted);
@@ -72,9 +73,19 @@ export async function untilEnded(
     await Promise.race([settled, sleep(LAST_STEP, undefined, { ref: false })]);
     return stopIsSuccess ? 0 : 130;
   } finally {
+    clearInterval(parentWatch);
     await ending.close();
     for (const signal of SIGNALS) process.off(signal, heed);
   }
+}
+
+/** npm hands signals on to us, but not its own being killed: that is seen by our having another parent. */
+function watchParent(gone: () => void): NodeJS.Timeout | undefined {
+  if (process.env.npm_lifecycle_event === undefined) return undefined;
+  const parent = process.ppid;
+  return setInterval(() => {
+    if (process.ppid !== parent) gone();
+  }, 500).unref();
 }
 
 /** Ends a child that leads a process group, and whatever is in the group: asked first, then made to. */

@@ -1,5 +1,5 @@
 import { spawn } from 'node:child_process';
-import { readdir, readFile } from 'node:fs/promises';
+import { access, readFile } from 'node:fs/promises';
 import { join } from 'node:path';
 import process from 'node:process';
 
@@ -21,13 +21,17 @@ export async function installPackages(root) {
   const wanted = await packagesOf(join(root, 'package-lock.json'));
   if (!wanted) throw new Error('package-lock.json is missing or damaged: fetch the project anew.');
   const installed = (await packagesOf(join(root, 'node_modules', '.package-lock.json'))) ?? {};
-  const missing = missingPackages(wanted, installed);
-  if (missing.length === 0) return;
+  const places = missingPackages(wanted, {});
+  const there = new Set(await present(root, places));
+  const missing = new Set([
+    ...missingPackages(wanted, installed),
+    ...places.filter((place) => !there.has(place)),
+  ]);
+  if (missing.size === 0) return;
 
-  const total = Object.keys(wanted).length - 1;
   const began = Date.now();
-  console.log(`Installing packages (${missing.length} of ${total} are missing or of another version) …`);
-  const progress = setInterval(() => void report(root, total, began), 10_000);
+  console.log(`Installing ${places.length} packages (${missing.size} missing or of another version) …`);
+  const progress = setInterval(() => void report(root, places, began), 10_000);
   try {
     await npmCi(root);
   } finally {
@@ -77,14 +81,22 @@ function reason(said) {
   return `The packages could not be installed:\n${said.trim().split('\n').slice(-15).join('\n')}`;
 }
 
-async function report(root, total, began) {
-  const folder = join(root, 'node_modules');
-  const names = await readdir(folder).catch(() => []);
-  const scoped = await Promise.all(
-    names.filter((name) => name.startsWith('@')).map((name) => readdir(join(folder, name)).catch(() => [])),
+/** Those of the places that hold a package. */
+async function present(root, places) {
+  const found = await Promise.all(
+    places.map((place) =>
+      access(join(root, place, 'package.json')).then(
+        () => [place],
+        () => [],
+      ),
+    ),
   );
-  const count = names.filter((name) => !/^[@.]/.test(name)).length + scoped.flat().length;
-  console.log(`  about ${Math.min(count, total)} of ${total} after ${seconds(began)}`);
+  return found.flat();
+}
+
+async function report(root, places, began) {
+  const there = await present(root, places);
+  console.log(`  ${there.length} of ${places.length} after ${seconds(began)}`);
 }
 
 const seconds = (began) => `${((Date.now() - began) / 1000).toFixed(1)} s`;
