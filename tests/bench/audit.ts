@@ -2,20 +2,7 @@ import { runAudit } from '@/lib/audit';
 import { compile } from '@/lib/network';
 import type { ActivityList } from '@/lib/schedule/activity-list';
 import { list } from '@/tests/support/networks';
-
-export interface AuditRow {
-  readonly name: string;
-  /** Activities of the list. */
-  readonly size: number;
-  /** Median of the repeats. */
-  readonly ms: number;
-  /** Activities a second. */
-  readonly perSecond: number;
-  /** Most memory in use while it ran, beyond what was in use before; MB. */
-  readonly peakMb: number;
-}
-
-const REPEATS = 3;
+import { measure, type BenchRow } from './measure';
 
 /** A list with 2.5 links an activity and a defect on every eighth row, of ten kinds. */
 function makeList(size: number): ActivityList {
@@ -50,26 +37,13 @@ function broken(number: number, [id, numbers, links]: Parts): Parts {
   return kinds[(number / 8) % kinds.length] ?? [id, numbers, links];
 }
 
-function measure(size: number, run: () => unknown): Omit<AuditRow, 'name' | 'size'> {
-  const times: number[] = [];
-  let peak = 0;
-  for (let repeat = 0; repeat < REPEATS; repeat += 1) {
-    globalThis.gc?.();
-    const before = process.memoryUsage().rss;
-    const started = performance.now();
-    run();
-    times.push(performance.now() - started);
-    peak = Math.max(peak, process.memoryUsage().rss - before);
-  }
-  const ms = times.sort((one, other) => one - other)[Math.floor(REPEATS / 2)] ?? 0;
-  return { ms, perSecond: (size / ms) * 1000, peakMb: peak / 1e6 };
-}
-
 /** The audit of a list of each size, the network at hand as in the service. */
-export function benchAudit(sizes: readonly number[]): AuditRow[] {
-  return sizes.map((size) => {
+export async function benchAudit(sizes: readonly number[]): Promise<BenchRow[]> {
+  const rows: BenchRow[] = [];
+  for (const size of sizes) {
     const received = makeList(size);
     const network = compile(received);
-    return { name: 'audit', size, ...measure(size, () => runAudit({ ...received }, network)) };
-  });
+    rows.push(await measure('audit', size, () => runAudit({ ...received }, network)));
+  }
+  return rows;
 }

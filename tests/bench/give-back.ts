@@ -4,18 +4,7 @@ import { readSheets } from '@/parsers';
 import { giveBack } from '@/parsers/workbook';
 import { columnLetters } from '@/lib/schedule/cell';
 import type { CellEdit } from '@/lib/schedule/edit';
-
-export interface GiveBackRow {
-  readonly name: string;
-  /** Rows of the list. */
-  readonly size: number;
-  readonly ms: number;
-  readonly rowsPerSecond: number;
-  /** Most memory in use while it ran, beyond what was in use before; MB. */
-  readonly peakMb: number;
-  /** How many times faster than loading and saving the same workbook with exceljs; null for what is not compared. */
-  readonly timesFaster: number | null;
-}
+import { measure, type BenchRow } from './measure';
 
 const MAIN = 'http://schemas.openxmlformats.org/spreadsheetml/2006/main';
 const OFFICE = 'http://schemas.openxmlformats.org/officeDocument/2006/relationships';
@@ -35,7 +24,6 @@ const HEADINGS = [
   'Remark',
 ];
 const CORRECTIONS = 200;
-const REPEATS = 3;
 
 /** A list of 12 columns with shared texts, as spreadsheet programs write it. */
 function makeList(size: number): Uint8Array {
@@ -104,25 +92,6 @@ function makeEdits(sheet: string, size: number): CellEdit[] {
   });
 }
 
-async function measure(
-  name: string,
-  size: number,
-  run: () => unknown,
-): Promise<Omit<GiveBackRow, 'timesFaster'>> {
-  const times: number[] = [];
-  let peak = 0;
-  for (let repeat = 0; repeat < REPEATS; repeat += 1) {
-    globalThis.gc?.();
-    const before = process.memoryUsage().rss;
-    const started = performance.now();
-    await run();
-    times.push(performance.now() - started);
-    peak = Math.max(peak, process.memoryUsage().rss - before);
-  }
-  const ms = times.sort((a, b) => a - b)[Math.floor(REPEATS / 2)] ?? 0;
-  return { name, size, ms, rowsPerSecond: (size / ms) * 1000, peakMb: peak / 1e6 };
-}
-
 async function withExcelJs(bytes: Uint8Array, edits: readonly CellEdit[]): Promise<void> {
   const book = new ExcelJS.Workbook();
   const copy = new ArrayBuffer(bytes.length);
@@ -136,8 +105,8 @@ async function withExcelJs(bytes: Uint8Array, edits: readonly CellEdit[]): Promi
 }
 
 /** A workbook and a CSV of each size, 200 cells corrected: given back by us, and loaded and saved by exceljs. */
-export async function benchGiveBack(sizes: readonly number[]): Promise<GiveBackRow[]> {
-  const rows: GiveBackRow[] = [];
+export async function benchGiveBack(sizes: readonly number[]): Promise<BenchRow[]> {
+  const rows: BenchRow[] = [];
   for (const size of sizes) {
     const bytes = makeList(size);
     const sheets = readSheets(bytes, 'list.xlsx');
@@ -145,7 +114,7 @@ export async function benchGiveBack(sizes: readonly number[]): Promise<GiveBackR
     const input = { bytes, fileName: 'list.xlsx', corrections: edits, changes: [], sheets };
     const ours = await measure('give back, workbook', size, () => giveBack(input));
     const theirs = await measure('exceljs, load and save', size, () => withExcelJs(bytes, edits));
-    rows.push({ ...ours, timesFaster: theirs.ms / ours.ms }, { ...theirs, timesFaster: null });
+    rows.push({ ...ours, ratio: { to: 'exceljs', times: theirs.ms / ours.ms } }, theirs);
 
     const lines = [HEADINGS, ...Array.from({ length: size }, (_, index) => listRow(index))];
     const text = lines
@@ -153,7 +122,7 @@ export async function benchGiveBack(sizes: readonly number[]): Promise<GiveBackR
       .join('\r\n');
     const csv = new Uint8Array(Buffer.from(text));
     const csvInput = { bytes: csv, fileName: 'list.csv', corrections: makeEdits('CSV', size), changes: [] };
-    rows.push({ ...(await measure('give back, CSV', size, () => giveBack(csvInput))), timesFaster: null });
+    rows.push(await measure('give back, CSV', size, () => giveBack(csvInput)));
   }
   return rows;
 }
