@@ -1,3 +1,4 @@
+import { cellAddress } from '@/lib/schedule/cell';
 import type { CellEdit } from '@/lib/schedule/edit';
 import type { CellContent, Sheet } from '@/lib/schedule/sheet';
 import { contentOf, settle, textOf } from './content';
@@ -60,9 +61,25 @@ export function applyCorrections(sheets: readonly Sheet[], corrections: Correcti
   return draft.finish();
 }
 
+/** A cell found by its address: where it really is, and what it holds. */
+export interface FoundCell extends Place {
+  readonly cell: string;
+  readonly content: CellContent;
+}
+
+/** Looks cells up by sheet and address; null where there is no such cell. */
+export function cellReader(sheets: readonly Sheet[]): (sheet: string, address: string) => FoundCell | null {
+  const draft = new WorkbookDraft(sheets);
+  return (name, address) => {
+    const sheet = draft.sheet(name);
+    const place = sheet?.place(address);
+    return sheet && place
+      ? { ...place, cell: cellAddress(place), content: contentOf(sheet.get(place)) }
+      : null;
+  };
+}
+
 /** What a cell of the sheets holds; null where there is no such cell. */
 export function contentAt(sheets: readonly Sheet[], sheet: string, address: string): CellContent {
-  const draft = new WorkbookDraft(sheets).sheet(sheet);
-  const place = draft?.place(address);
-  return draft && place ? contentOf(draft.get(place)) : null;
+  return cellReader(sheets)(sheet, address)?.content ?? null;
 }

@@ -1,4 +1,12 @@
-export { applyCorrections, contentAt, type CorrectionEvent, type Corrections, editsOf } from './apply';
+export {
+  applyCorrections,
+  cellReader,
+  contentAt,
+  type CorrectionEvent,
+  type Corrections,
+  editsOf,
+  type FoundCell,
+} from './apply';
 export { type CheckedEdits, checkHandEdits, type EditProblem, type HandEdit, SHEET_LIMITS } from './by-hand';
 export { type Adoptable, type Adopted, type Adoption, composeAdoption, type Skipped } from './compose';
 export { contentOf } from './content';
