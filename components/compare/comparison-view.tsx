@@ -37,7 +37,7 @@ export function ComparisonView({ comparison, earlier, later }: ComparisonViewPro
         )}
       </Panel>
       <Panel
-        title={`${format.plural(unasked.length, 'value', 'values')} changed unasked`}
+        title={`${countOrNo(unasked.length, 'value', 'values', format)} changed unasked`}
         sub={`${format.plural(same, 'activity is', 'activities are')} the same in both.`}
       >
         {unasked.length > 0 && (
@@ -101,8 +101,13 @@ function UnaskedRow({ entry }: { entry: Unasked }) {
   );
 }
 
-function Activities({ title, activities }: { title: string; activities: readonly ComparedActivity[] }) {
+function countOrNo(count: number, one: string, many: string, format: Format): string {
+  return count === 0 ? `No ${one}` : format.plural(count, one, many);
+}
+
+function Activities({ what, activities }: { what: string; activities: readonly ComparedActivity[] }) {
   const format = useFormat();
+  const title = `${countOrNo(activities.length, 'activity', 'activities', format)} ${what}`;
   return (
     <Panel title={title}>
       {activities.length > 0 && (

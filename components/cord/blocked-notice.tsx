@@ -8,7 +8,7 @@ import { useAnalysis } from '@/lib/client/submissions';
 import type { Figures, FindingView, SubmissionView } from '@/lib/contract/submission';
 import { stopPath } from './stops';
 
-/** As many as are named; the rest are counted. */
+/** As many are named; of more than one beyond them only the number is told. */
 const NAMED = 4;
 
 /** Why the schedule as corrected has no figures, and what they would be if the proposed fixes were adopted. */
@@ -47,10 +47,11 @@ function BlockingList({
   findings: readonly FindingView[];
 }) {
   const base = stopPath(office, submission, 'findings');
-  const more = findings.length - NAMED;
+  const named = findings.length === NAMED + 1 ? findings.length : NAMED;
+  const more = findings.length - named;
   return (
     <ul className="mt-1">
-      {findings.slice(0, NAMED).map((finding) => (
+      {findings.slice(0, named).map((finding) => (
         <li key={finding.id} className="flex items-baseline gap-2">
           <WeightMark weight="blocks" bare />
           <span>
@@ -61,7 +62,7 @@ function BlockingList({
       {more > 0 && (
         <li>
           <Link href={`${base}?weight=blocks&state=open`}>
-            and {more} more {more === 1 ? 'finding' : 'findings'} that block the computation
+            and {more} more findings that block the computation
           </Link>
         </li>
       )}
