@@ -49,14 +49,8 @@ export function ComparisonView({ comparison, earlier, later }: ComparisonViewPro
           />
         )}
       </Panel>
-      <Activities
-        title={`${format.plural(added.length, 'activity', 'activities')} added`}
-        activities={added}
-      />
-      <Activities
-        title={`${format.plural(removed.length, 'activity', 'activities')} removed`}
-        activities={removed}
-      />
+      <Activities what="added" activities={added} />
+      <Activities what="removed" activities={removed} />
     </div>
   );
 }
