@@ -3,7 +3,6 @@
 import { NotComputable } from '@/components/path/not-computable';
 import { StateSwitch } from '@/components/path/state-switch';
 import { usePlace } from '@/components/path/use-place';
-import { Caution } from '@/components/ui/caution';
 import { ErrorState, Loading } from '@/components/ui/states';
 import { useAnalysis, useSubmission } from '@/lib/client/submissions';
 import { ConfidenceAnswer } from './confidence-answer';
@@ -53,7 +52,6 @@ export function ConfidencePlace({ office, submission }: { office: string; submis
           onAsk={(next) => set({ ask: next.way, value: next.value })}
         />
       )}
-      <Caution />
     </div>
   );
 }

@@ -1,7 +1,7 @@
 'use client';
 
 import { useFormat } from '@/components/ui/locale';
-import { dateOfStart, type WorkCalendar } from '@/lib/schedule/calendar';
+import { dateOfFinish, type WorkCalendar } from '@/lib/schedule/calendar';
 import { useWidth } from '@/components/path/use-size';
 import type { ChanceView } from '@/lib/contract/submission';
 import { drawCurve, type CurveKind } from './curve';
@@ -86,7 +86,7 @@ export function CurveChart({
               </text>
               <text y="36" textAnchor="middle" fontSize="12" fill="var(--slate)">
                 {tick >= 0 && Number.isInteger(tick)
-                  ? shortDate(dateOfStart(calendar, start, tick), format.locale)
+                  ? shortDate(dateOfFinish(calendar, start, tick), format.locale)
                   : ''}
               </text>
             </g>

@@ -2,6 +2,7 @@
 
 import { useState, type FormEvent } from 'react';
 import { Button } from '@/components/ui/button';
+import { DateText } from '@/components/ui/date-text';
 import { Chip } from '@/components/ui/chip';
 import { Field, Input } from '@/components/ui/field';
 import { readQuestion, WAYS, type Asked, type Way } from './question';
@@ -37,7 +38,7 @@ export function QuestionForm({ asked, onAsk }: { asked: Asked; onAsk: (asked: As
       </div>
       <Field label={LABEL[draft.way]} error={error} required>
         {(aria) => (
-          <div className="flex gap-2">
+          <div className="flex flex-wrap items-center gap-2">
             <Input
               {...aria}
               key={draft.way}
@@ -47,6 +48,7 @@ export function QuestionForm({ asked, onAsk }: { asked: Asked; onAsk: (asked: As
               onChange={(event) => setDraft({ ...draft, value: event.target.value })}
               className="max-w-56"
             />
+            {draft.way === 'date' && <DateText value={draft.value} />}
             <Button type="submit">Answer</Button>
           </div>
         )}

@@ -31,48 +31,56 @@ export function WorkedAnswer({ chance, asked }: { chance: ChanceView; asked: Ask
       </table>
       <div className="flex flex-col gap-5">
         {forConfidence && z !== null && (
-          <WorkingTable
-            working={{
-              title: 'The day for that confidence',
-              formula: 'x = expected + z × deviation, with Φ(z) = confidence',
-              figures: `${n(mean, 3)} + ${n(z, 4)} × ${n(deviation, 4)}`,
-              result: `${format.days(days, 3)}, the working day of ${format.date(chance.date)}`,
-              source: 'normal quantile: Wichura 1988, AS 241',
-            }}
-          />
+          <div>
+            <WorkingTable
+              working={{
+                title: 'The day for that confidence',
+                formula: 'x = expected + z × deviation, with Φ(z) = confidence',
+                figures: `${n(mean, 3)} + ${n(z, 4)} × ${n(deviation, 4)}`,
+                result: `${format.days(days, 3)}, the working day of ${format.date(chance.date)}`,
+                source: 'normal quantile: Wichura 1988, AS 241',
+              }}
+            />
+          </div>
         )}
         {z === null ? (
-          <WorkingTable
-            working={{
-              title: 'No spread',
-              formula: 'deviation = 0: the chance is a step',
-              figures: `${n(days, 3)} ${before === 1 ? '≥' : '<'} ${n(mean, 3)}`,
-              result: before === 1 ? 'finished by then' : 'later than that',
-              source: 'a = m = b along the path, so nothing is left to chance',
-            }}
-          />
+          <div>
+            <WorkingTable
+              working={{
+                title: 'No spread',
+                formula: 'deviation = 0: the chance is a step',
+                figures: `${n(days, 3)} ${before === 1 ? '≥' : '<'} ${n(mean, 3)}`,
+                result: before === 1 ? 'finished by then' : 'later than that',
+                source: 'a = m = b along the path, so nothing is left to chance',
+              }}
+            />
+          </div>
         ) : (
-          <WorkingTable
-            working={{
-              title: 'How many deviations away',
-              formula: 'z = (x − expected) / deviation',
-              figures: `(${n(days, 3)} − ${n(mean, 3)}) / ${n(deviation, 4)}`,
-              result: n(z, 4),
-              source: 'Malcolm, Roseboom, Clark, Fazar 1959',
-            }}
-          />
+          <div>
+            <WorkingTable
+              working={{
+                title: 'How many deviations away',
+                formula: 'z = (x − expected) / deviation',
+                figures: `(${n(days, 3)} − ${n(mean, 3)}) / ${n(deviation, 4)}`,
+                result: n(z, 4),
+                source: 'Malcolm, Roseboom, Clark, Fazar 1959',
+              }}
+            />
+          </div>
         )}
         {z !== null && table && (
-          <WorkingTable
-            working={{
-              title: 'Chance of having finished',
-              formula: 'before = Φ(z), after = 1 − Φ(z)',
-              figures: `Φ(${n(z, 4)})`,
-              result: `${n(before, 6)} before, ${n(after, 6)} after`,
-              source: 'cumulative normal distribution',
-              note: `The printed table, read at z = ${n(table.z, 2)}, has ${n(table.before, 4)}.`,
-            }}
-          />
+          <div>
+            <WorkingTable
+              working={{
+                title: 'Chance of having finished',
+                formula: 'before = Φ(z), after = 1 − Φ(z)',
+                figures: `Φ(${n(z, 4)})`,
+                result: `${n(before, 6)} before, ${n(after, 6)} after`,
+                source: 'cumulative normal distribution',
+                note: `The printed table, read at z = ${n(table.z, 2)}, has ${n(table.before, 4)}.`,
+              }}
+            />
+          </div>
         )}
       </div>
     </Panel>

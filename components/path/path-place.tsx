@@ -1,7 +1,6 @@
 'use client';
 
 import { useCallback, useMemo } from 'react';
-import { Caution } from '@/components/ui/caution';
 import { Chip } from '@/components/ui/chip';
 import { Select } from '@/components/ui/field';
 import { ErrorState, Loading } from '@/components/ui/states';
@@ -47,15 +46,17 @@ export function PathPlace({ office, submission }: { office: string; submission: 
           withProposed={proposed !== null || state === 'proposed'}
           onChange={(next) => set({ state: next })}
         />
-        <label className="flex items-center gap-2">
+        <label className="flex items-center gap-2 whitespace-nowrap">
           near-critical within
-          <Select value={near} className="w-auto" onChange={(event) => set({ near: event.target.value })}>
-            {NEAR.map((days) => (
-              <option key={days} value={days}>
-                {days} d
-              </option>
-            ))}
-          </Select>
+          <span className="w-24">
+            <Select value={near} onChange={(event) => set({ near: event.target.value })}>
+              {NEAR.map((days) => (
+                <option key={days} value={days}>
+                  {days} d
+                </option>
+              ))}
+            </Select>
+          </span>
         </label>
       </div>
       {analysis.isPending && <Loading label="Computing the network" rows={6} />}
@@ -82,7 +83,6 @@ export function PathPlace({ office, submission }: { office: string; submission: 
           onPath={(next) => set({ path: String(next) })}
         />
       )}
-      <Caution />
     </div>
   );
 }

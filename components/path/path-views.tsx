@@ -35,7 +35,7 @@ export function PathViews(props: PathViewsProps) {
   const { analysis, byId, view, selected } = props;
   const activity = selected === null ? undefined : byId.get(selected);
   return (
-    <div className={activity ? 'grid gap-4 xl:grid-cols-[minmax(0,1fr)_340px]' : 'grid gap-4'}>
+    <div className={activity ? 'grid items-start gap-4 xl:grid-cols-[minmax(0,1fr)_340px]' : 'grid gap-4'}>
       {view === 'chain' && <ChainPanel {...props} />}
       {view === 'time' && <TimePanel {...props} />}
       {view === 'table' && (
@@ -77,15 +77,17 @@ function ChainPanel({ analysis, byId, near, pathIndex, selected, onSelect, onPat
       }
       aside={
         analysis.criticalPaths.length > 1 && (
-          <label className="flex items-center gap-2">
+          <label className="flex items-center gap-2 whitespace-nowrap">
             path
-            <Select className="w-auto" value={index} onChange={(event) => onPath(Number(event.target.value))}>
-              {analysis.criticalPaths.map((each, at) => (
-                <option key={at} value={at}>
-                  {at + 1}: {each.length} activities
-                </option>
-              ))}
-            </Select>
+            <span className="w-44">
+              <Select value={index} onChange={(event) => onPath(Number(event.target.value))}>
+                {analysis.criticalPaths.map((each, at) => (
+                  <option key={at} value={at}>
+                    {at + 1}: {each.length} activities
+                  </option>
+                ))}
+              </Select>
+            </span>
           </label>
         )
       }
@@ -113,15 +115,17 @@ function TimePanel({ analysis, shown, near, selected, onSelect, onShown }: PathV
       title={`From ${format.date(analysis.start)} to ${format.date(analysis.finish)}: ${format.count(critical)} of ${format.plural(analysis.activities.length, 'activity is', 'activities are')} critical`}
       sub="Bar: expected duration from the early start. Bracket above it: a to b. Double rule: critical; dashed: near-critical. Dots: slack to the late finish."
       aside={
-        <label className="flex items-center gap-2">
+        <label className="flex items-center gap-2 whitespace-nowrap">
           show
-          <Select className="w-auto" value={shown} onChange={(event) => onShown(event.target.value as Shown)}>
-            {Object.entries(SHOWN).map(([id, word]) => (
-              <option key={id} value={id}>
-                {word}
-              </option>
-            ))}
-          </Select>
+          <span className="w-52">
+            <Select value={shown} onChange={(event) => onShown(event.target.value as Shown)}>
+              {Object.entries(SHOWN).map(([id, word]) => (
+                <option key={id} value={id}>
+                  {word}
+                </option>
+              ))}
+            </Select>
+          </span>
         </label>
       }
     >

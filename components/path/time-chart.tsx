@@ -5,7 +5,7 @@ import { useFormat } from '@/components/ui/locale';
 import type { AnalysedActivity, AnalysisView } from '@/lib/contract/submission';
 import { dateOfStart } from '@/lib/schedule/calendar';
 import { rowsInSight, standing } from './rows';
-import { ROW_HEIGHT, TimeRow } from './time-row';
+import { PAD, ROW_HEIGHT, TimeRow } from './time-row';
 import { timeScale, type TimeScale } from './time-scale';
 import { useWidth } from './use-size';
 
@@ -36,7 +36,7 @@ export function TimeChart({
       rows.reduce((most, row) => Math.max(most, row.earlyStart + row.pessimistic), analysis.expectedDuration),
     [rows, analysis],
   );
-  const scale = timeScale(end, Math.max(120, width - labels - 24));
+  const scale = timeScale(end, Math.max(120, width - labels - 2 * PAD));
   const height = Math.min(TALLEST, rows.length * ROW_HEIGHT + AXIS_HEIGHT);
   const { first, end: last } = rowsInSight(scrollTop, TALLEST, ROW_HEIGHT, rows.length);
 
@@ -74,13 +74,13 @@ function Axis({ analysis, scale, left }: { analysis: Computed; scale: TimeScale;
   return (
     <svg
       className="sticky top-0 z-10 block border-b border-ink bg-leaf text-sm"
-      width={left + scale.width + 24}
+      width={left + scale.width + 2 * PAD}
       height={AXIS_HEIGHT - 1}
       role="img"
       aria-label={`Axis in working days from ${format.date(analysis.start)}, with dates under them`}
     >
       {scale.ticks.map((day) => (
-        <g key={day} transform={`translate(${left + scale.x(day)},0)`}>
+        <g key={day} transform={`translate(${left + PAD + scale.x(day)},0)`}>
           <path d="M0 36v8" stroke="var(--ink)" />
           <text y="14" textAnchor={day === 0 ? 'start' : 'middle'} fill="var(--ink)" fontSize="13">
             {format.number(day, 0)} d

@@ -8,6 +8,8 @@ import type { Standing } from './rows';
 import type { TimeScale } from './time-scale';
 
 export const ROW_HEIGHT = 30;
+/** Room left and right of the scale, so that a bob at either end is whole. */
+export const PAD = 12;
 
 const COLOUR: Record<Standing, string> = {
   critical: 'var(--umber)',
@@ -51,16 +53,18 @@ export const TimeRow = memo(function TimeRow({
       >
         {activity.name || activity.id}
       </span>
-      <svg width={scale.width + 24} height={ROW_HEIGHT} aria-hidden="true" className="flex-none">
-        {scale.ticks.map((day) => (
-          <path key={day} d={`M${scale.x(day)} 0v${ROW_HEIGHT}`} stroke="var(--hair)" />
-        ))}
-        {activity.expected === 0 ? (
-          <Milestone x={scale.x(activity.earlyStart)} colour={COLOUR[standing]} />
-        ) : (
-          <Bar activity={activity} standing={standing} scale={scale} />
-        )}
-        <Tail activity={activity} scale={scale} />
+      <svg width={scale.width + 2 * PAD} height={ROW_HEIGHT} aria-hidden="true" className="flex-none">
+        <g transform={`translate(${PAD},0)`}>
+          {scale.ticks.map((day) => (
+            <path key={day} d={`M${scale.x(day)} 0v${ROW_HEIGHT}`} stroke="var(--hair)" />
+          ))}
+          {activity.expected === 0 ? (
+            <Milestone x={scale.x(activity.earlyStart)} colour={COLOUR[standing]} />
+          ) : (
+            <Bar activity={activity} standing={standing} scale={scale} />
+          )}
+          <Tail activity={activity} scale={scale} />
+        </g>
       </svg>
     </button>
   );

@@ -1,5 +1,6 @@
 import type { OfficeContext } from '@/lib/access/context';
 import { createComment } from '@/lib/services/comments/create';
+import { createCorrections } from '@/lib/services/corrections/create';
 import { listFindings } from '@/lib/services/findings/list';
 import { createProject } from '@/lib/services/projects/create';
 import { createSubmission } from '@/lib/services/submissions/create';
@@ -27,7 +28,7 @@ export async function seedDemo(
       name: 'Upper Tarnbeck pumping station',
       contractor: civils,
       start: '2027-03-01',
-      targetFinish: '2027-12-17',
+      targetFinish: '2027-11-19',
       calendar: { workingDays: [1, 2, 3, 4, 5], holidays: ['2027-03-26', '2027-03-29', '2027-05-03'] },
     },
   });
@@ -46,7 +47,7 @@ export async function seedDemo(
       name: 'Millrace intake screens',
       contractor: pumps,
       start: '2027-02-01',
-      targetFinish: '2027-06-11',
+      targetFinish: '2027-05-19',
     },
   });
   await submit(analyst, screens.id, 'millrace-issue-a.xlsx', await toWorkbook(intakeScreens));
@@ -58,11 +59,11 @@ export async function seedDemo(
       name: 'Telemetry changeover',
       contractor: controls,
       start: '2027-04-05',
-      targetFinish: '2027-10-15',
+      targetFinish: '2027-08-27',
       unit: 'day',
     },
   });
-  await submit(analyst, telemetry.id, 'telemetry.csv', toCsv(telemetryRev0));
+  await adoptFixes(analyst, await submit(analyst, telemetry.id, 'telemetry.csv', toCsv(telemetryRev0)));
   await submit(office.contextOf('scheduler3'), telemetry.id, 'telemetry-rev1.csv', toCsv(telemetryRev1));
   return { password: office.password, accounts: office.accounts };
 }
@@ -70,6 +71,14 @@ export async function seedDemo(
 async function submit(ctx: OfficeContext, project: string, name: string, bytes: Uint8Array): Promise<string> {
   const form = { file: { name, bytes }, fields: {} };
   return (await createSubmission(ctx, { path: { project }, form })).id;
+}
+
+/** What the analyst asked of the first issue, so that the next one can be compared with it. */
+async function adoptFixes(ctx: OfficeContext, submission: string): Promise<void> {
+  const path = { submission };
+  const { items } = await listFindings(ctx, { path });
+  const fixes = items.flatMap(({ fix }) => (fix ? [fix.id] : []));
+  await createCorrections(ctx, { path, body: { version: 0, fixes } });
 }
 
 /** A first exchange about two of the rows in question. */
