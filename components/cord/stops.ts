@@ -1,5 +1,5 @@
 import type { SubmissionView } from '@/lib/contract/submission';
-import { formatDays, formatPercent, plural } from '@/lib/client/format';
+import { formatCount, formatDays, formatPercent, plural } from '@/lib/client/format';
 
 /** The five places along the cord, from the top down; the first is the submission's own address. */
 export const STOPS = ['findings', 'path', 'confidence', 'compare', 'record'] as const;
@@ -29,7 +29,7 @@ export function stopNote(stop: Stop, submission: SubmissionView, locale: string)
   const { open, figures, project, revision, record } = submission;
   switch (stop) {
     case 'findings':
-      return `${String(open.blocks + open.distorts + open.query)} open`;
+      return `${formatCount(open.blocks + open.distorts + open.query, locale)} open`;
     case 'path':
       return figures.corrected.expectedDuration === null
         ? 'blocked'

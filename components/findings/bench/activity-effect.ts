@@ -36,8 +36,9 @@ export function activityEffect(
     const column = columnOf(piece.columns, edit, row);
     if (!column) continue;
     const unit = daysPerUnit(piece.columns, shown.corrected.cells, estimates, column);
-    if (typeof edit.to !== 'number' || unit === null) return null;
-    after = { ...after, ...written(column.field, edit.to * unit) };
+    const value = plainNumber(edit.to);
+    if (value === null || unit === null) return null;
+    after = { ...after, ...written(column.field, value * unit) };
     touched = true;
   }
   const moments = touched ? momentsOf(after) : null;
@@ -81,10 +82,15 @@ function unitFrom(
   estimates: RowEstimates,
   field: EstimateField,
 ): number | null {
-  const text = cells[columns.findIndex((column) => column.field === field)]?.trim() ?? '';
+  const value = plainNumber(cells[columns.findIndex((column) => column.field === field)] ?? null);
   const days = field === 'duration' ? estimates.likely : estimates[field];
-  const value = text === '' ? 0 : Number(text);
-  return days === null || days === 0 || !Number.isFinite(value) || value === 0 ? null : days / value;
+  return days === null || days === 0 || value === null || value === 0 ? null : days / value;
+}
+
+/** A number without a unit or a doubtful separator; in a text file a number is a text as well. */
+function plainNumber(content: CellEditView['to']): number | null {
+  if (typeof content === 'number') return content;
+  return content !== null && /^-?\d+(\.\d+)?$/.test(content.trim()) ? Number(content) : null;
 }
 
 function written(field: EstimateField, days: number): Partial<RowEstimates> {

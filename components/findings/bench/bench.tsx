@@ -38,7 +38,7 @@ export function Bench({ office, submission, finding, ofRule, steps, onAdoptRule 
       {finding.origin === 'correction' && (
         <p className="mt-1 text-slate">A correction made this; the list did not have it when it came.</p>
       )}
-      <CellsSection finding={finding} bench={bench} />
+      <CellsSection finding={finding} file={submission.file.name} bench={bench} />
       <BenchSection title="Fix">
         {steps.trouble?.finding === finding.id && (
           <TroubleNote trouble={steps.trouble} onDismiss={steps.forgetTrouble} />

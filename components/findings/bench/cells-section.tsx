@@ -7,12 +7,20 @@ import { markedCells, MOST_ROWS } from './sheet-cells';
 import { SheetPiece } from './sheet-piece';
 import type { BenchState } from './use-bench';
 
+interface CellsSectionProps {
+  finding: FindingView;
+  /** Name of the file it came in. */
+  file: string;
+  bench: BenchState;
+}
+
 /** The cells a finding is about, as they stand in the sheet; nothing where it is about the whole list. */
-export function CellsSection({ finding, bench }: { finding: FindingView; bench: BenchState }) {
+export function CellsSection({ finding, file, bench }: CellsSectionProps) {
   const { rows, piece, rowsAnswer, edits, proposed } = bench;
   if (rows.length === 0) return null;
+  const workbook = /\.xls[a-z]?$/i.test(file);
   return (
-    <BenchSection title={`In the workbook, sheet “${finding.sheet ?? ''}”`}>
+    <BenchSection title={workbook ? `In the workbook, sheet “${finding.sheet ?? ''}”` : 'In the file'}>
       {piece && (
         <SheetPiece piece={piece} rows={rows} marked={markedCells(finding, edits)} proposed={proposed} />
       )}

@@ -36,7 +36,7 @@ export function SheetPiece({ piece, rows, marked, proposed }: SheetPieceProps) {
                 key={column.index}
                 scope="col"
                 title={column.title}
-                className="border border-hair px-2 py-0.5 text-center font-semibold"
+                className="border border-hair px-2 py-0.5 text-center font-semibold whitespace-nowrap"
               >
                 {column.letters} · {columnHeading(column)}
               </th>
@@ -80,8 +80,19 @@ function Cell({ marked, shown }: { marked: boolean; shown: CellShown }) {
         marked && 'outline-2 -outline-offset-2 outline-umber',
       )}
     >
-      {shown.kind === 'same' ? shown.text : <Change from={shown.from} to={shown.to} />}
+      {shown.kind === 'same' ? (
+        shown.text
+      ) : (
+        <span className={classes(isShort(shown) && 'whitespace-nowrap')}>
+          <Change from={shown.from} to={shown.to} />
+        </span>
+      )}
       {marked && <span className="sr-only"> (this cell is what the finding is about)</span>}
     </td>
   );
+}
+
+/** Fits beside the other estimates without a break. */
+function isShort({ from, to }: { from: string; to: string }): boolean {
+  return from.length + to.length <= 8;
 }

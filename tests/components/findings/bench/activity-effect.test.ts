@@ -27,6 +27,11 @@ describe('what a fix makes of its activity', () => {
     expect(effect?.after.variance).toBeCloseTo((7 / 6) ** 2, 12);
   });
 
+  it('takes a plain number in a text file for a number', () => {
+    expect(activityEffect(piece, 23, [edit('I23', '11', '12')])?.after.expected).toBeCloseTo(34 / 6, 12);
+    expect(activityEffect(piece, 23, [edit('I23', '11', '1,200')])).toBeNull();
+  });
+
   it('keeps the unit the cells are in', () => {
     const inWeeks: SheetRowsView = {
       ...piece,
