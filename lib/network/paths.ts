@@ -14,19 +14,21 @@ export interface CriticalPaths {
   readonly variance: number;
   /** By activity; the path with the largest variance first, at most `limit`. */
   readonly listed: readonly (readonly number[])[];
-  /** Exact up to 2^53, beyond that to sixteen digits; Infinity beyond the largest double. */
+  /** Exact up to 2^53, beyond that to sixteen digits; the largest double where it holds no more. */
   readonly count: number;
 }
 
-/** Critical activities with those that drive them, all by rank, in order. */
+/**
+ * The critical activities, numbered among themselves in order, with those that drive each: few, as a rule, so
+ * that nothing here is as large as the network.
+ */
 interface CriticalGraph {
-  readonly ranks: readonly number[];
-  /** Drivers of rank r: driver[start[r]] … driver[end[r] − 1]; only for critical ranks. */
-  readonly start: Int32Array;
-  readonly end: Int32Array;
-  readonly driver: Int32Array;
-  /** 1 where a critical activity drives a further one. */
-  readonly drives: Uint8Array;
+  readonly activity: readonly number[];
+  /** Drivers of the k-th: driver[start[k]] … driver[start[k + 1] − 1], each numbered as here. */
+  readonly start: readonly number[];
+  readonly driver: readonly number[];
+  /** Those that drive no further one. */
+  readonly ends: readonly number[];
 }
 
 /** Finds, counts and lists the critical paths; counting and the largest variance need no list of them. */
@@ -38,88 +40,87 @@ export function criticalPaths(
   limit: number,
 ): CriticalPaths {
   const graph = criticalGraph(plan, forward, critical);
-  const ends = graph.ranks.filter((r) => graph.drives[r] === 0);
-  const { best, sum } = largestVariance(plan, graph, ends, variance);
-  const others = listPaths(graph, ends, limit + 1).filter((path) => !isSame(path, best));
-  const toActivities = (path: readonly number[]) => path.map((r) => plan.order[r]!);
+  const { best, sum } = largestVariance(graph, variance);
+  const others = listPaths(graph, limit + 1).filter((path) => !isSame(path, best));
+  const toActivities = (path: readonly number[]) => path.map((k) => graph.activity[k]!);
   return {
     variance: sum,
     listed: best.length === 0 ? [] : [best, ...others].slice(0, limit).map(toActivities),
-    count: countPaths(plan.count, graph, ends),
+    count: countPaths(graph),
   };
 }
 
 function criticalGraph(plan: Plan, { earlyStart }: ForwardPass, critical: Uint8Array): CriticalGraph {
   const { count, order, start: into, source, weight } = plan;
-  const ranks: number[] = [];
-  const start = new Int32Array(count);
-  const end = new Int32Array(count);
-  const driver = new Int32Array(source.length);
-  const drives = new Uint8Array(count);
-  const seenFor = new Int32Array(count).fill(-1);
-  let next = 0;
+  const activity: number[] = [];
+  const start = [0];
+  const driver: number[] = [];
+  const drives: boolean[] = [];
+  const numberOf = new Map<number, number>();
   for (let r = 0; r < count; r++) {
     if (critical[order[r]!] === 0) continue;
-    ranks.push(r);
-    start[r] = next;
+    const first = driver.length;
     for (let position = into[r]!; position < into[r + 1]!; position++) {
       const from = source[position]!;
-      const slack = earlyStart[r]! - (earlyStart[from]! + weight[position]!);
-      if (slack > TOLERANCE || seenFor[from] === r || critical[order[from]!] === 0) continue;
-      seenFor[from] = r;
-      driver[next++] = from;
-      drives[from] = 1;
+      if (earlyStart[r]! - (earlyStart[from]! + weight[position]!) > TOLERANCE) continue;
+      const k = numberOf.get(from);
+      if (k === undefined || driver.indexOf(k, first) !== -1) continue;
+      driver.push(k);
+      drives[k] = true;
     }
-    end[r] = next;
+    numberOf.set(r, activity.length);
+    activity.push(order[r]!);
+    start.push(driver.length);
   }
-  return { ranks, start, end, driver, drives };
+  const ends = activity.map((_, k) => k).filter((k) => !drives[k]);
+  return { activity, start, driver, ends };
 }
 
-function largestVariance(plan: Plan, graph: CriticalGraph, ends: readonly number[], variance: Float64Array) {
-  const sums = new Float64Array(plan.count);
-  const before = new Int32Array(plan.count).fill(-1);
-  for (const r of graph.ranks) {
+function largestVariance({ activity, start, driver, ends }: CriticalGraph, variance: Float64Array) {
+  const sums: number[] = [];
+  const before: number[] = [];
+  for (let k = 0; k < activity.length; k++) {
     let best = -1;
-    for (let k = graph.start[r]!; k < graph.end[r]!; k++) {
-      const from = graph.driver[k]!;
-      if (best === -1 || sums[from]! > sums[best]!) best = from;
+    for (let p = start[k]!; p < start[k + 1]!; p++) {
+      if (best === -1 || sums[driver[p]!]! > sums[best]!) best = driver[p]!;
     }
-    before[r] = best;
-    sums[r] = variance[plan.order[r]!]! + (best === -1 ? 0 : sums[best]!);
+    before.push(best);
+    sums.push(variance[activity[k]!]! + (best === -1 ? 0 : sums[best]!));
   }
   const path: number[] = [];
   const [first = -1, ...rest] = ends;
-  const last = rest.reduce((best, r) => (sums[r]! > sums[best]! ? r : best), first);
-  for (let r = last; r !== -1; r = before[r]!) path.push(r);
+  const last = rest.reduce((best, k) => (sums[k]! > sums[best]! ? k : best), first);
+  for (let k = last; k !== -1; k = before[k]!) path.push(k);
   return { best: path.reverse(), sum: last === -1 ? 0 : sums[last]! };
 }
 
-function countPaths(count: number, graph: CriticalGraph, ends: readonly number[]): number {
-  const paths = new Float64Array(count);
-  for (const r of graph.ranks) {
-    let sum = graph.start[r] === graph.end[r] ? 1 : 0;
-    for (let k = graph.start[r]!; k < graph.end[r]!; k++) sum += paths[graph.driver[k]!]!;
-    paths[r] = sum;
+function countPaths({ activity, start, driver, ends }: CriticalGraph): number {
+  const paths: number[] = [];
+  for (let k = 0; k < activity.length; k++) {
+    let sum = start[k] === start[k + 1] ? 1 : 0;
+    for (let p = start[k]!; p < start[k + 1]!; p++) sum += paths[driver[p]!]!;
+    paths.push(sum);
   }
-  return ends.reduce((sum, r) => sum + paths[r]!, 0);
+  const total = ends.reduce((sum, k) => sum + paths[k]!, 0);
+  return Math.min(total, Number.MAX_VALUE);
 }
 
 /** Up to `limit` paths, walked back from the ends; every step back leads to a path, so none is in vain. */
-function listPaths(graph: CriticalGraph, ends: readonly number[], limit: number): number[][] {
+function listPaths({ start, driver, ends }: CriticalGraph, limit: number): number[][] {
   const paths: number[][] = [];
   for (const last of ends) {
     const chain = [last];
-    const cursor = [graph.start[last]!];
+    const cursor = [start[last]!];
     while (chain.length > 0 && paths.length < limit) {
       const depth = chain.length - 1;
-      const r = chain[depth]!;
-      if (graph.start[r] === graph.end[r]) paths.push(chain.toReversed());
-      const k = cursor[depth]!;
-      if (k < graph.end[r]!) {
-        cursor[depth] = k + 1;
-        const from = graph.driver[k]!;
+      const k = chain[depth]!;
+      if (start[k] === start[k + 1]) paths.push(chain.toReversed());
+      const p = cursor[depth]!;
+      if (p < start[k + 1]!) {
+        cursor[depth] = p + 1;
+        const from = driver[p]!;
         chain.push(from);
-        cursor.push(graph.start[from]!);
+        cursor.push(start[from]!);
       } else {
         chain.pop();
         cursor.pop();

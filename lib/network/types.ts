@@ -55,7 +55,7 @@ export type Analysis =
       readonly standardDeviation: number;
       /** The path whose variance is reported stands first; up to 50 are listed. */
       readonly criticalPaths: readonly (readonly number[])[];
-      /** Exact up to 2^53, beyond that to sixteen digits; Infinity beyond the largest double. */
+      /** Exact up to 2^53, beyond that to sixteen digits; the largest double where it holds no more. */
       readonly criticalPathCount: number;
       readonly times: Times;
     }

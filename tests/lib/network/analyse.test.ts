@@ -130,6 +130,7 @@ describe('critical paths without number', () => {
   it('are counted to a double’s precision beyond what it holds exactly', () => {
     expect(analysed(diamonds(60)).criticalPathCount).toBe(2 ** 60);
     expect(analysed(diamonds(52)).criticalPathCount).toBe(2 ** 52);
+    expect(analysed(diamonds(1100)).criticalPathCount).toBe(Number.MAX_VALUE);
   });
 });
 
