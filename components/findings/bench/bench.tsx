@@ -10,6 +10,7 @@ import { BenchSection } from './bench-section';
 import { CellsSection } from './cells-section';
 import { CorrectedFix } from './corrected-fix';
 import { closedReason } from './fix-choice';
+import { KeptFocus } from './kept-focus';
 import { OpenFix } from './open-fix';
 import { TroubleNote } from './trouble-note';
 import { useBench } from './use-bench';
@@ -44,26 +45,28 @@ export function Bench({ office, submission, finding, ofRule, steps, onAdoptRule 
           <TroubleNote trouble={steps.trouble} onDismiss={steps.forgetTrouble} />
         )}
         {closed && <p className="mb-2 text-slate">{closed}</p>}
-        {bench.open ? (
-          <OpenFix
-            finding={finding}
-            bench={bench}
-            ofRule={ofRule}
-            busy={steps.busy}
-            closed={closed !== null}
-            onAdoptRule={onAdoptRule}
-          />
-        ) : (
-          <CorrectedFix
-            office={office}
-            submission={submission.id}
-            finding={finding}
-            busy={steps.busy}
-            mayUndo={bench.may('corrections:undo')}
-            lastBatch={steps.last}
-            onUndo={() => void steps.undoFinding(finding)}
-          />
-        )}
+        <KeptFocus when={bench.open}>
+          {bench.open ? (
+            <OpenFix
+              finding={finding}
+              bench={bench}
+              ofRule={ofRule}
+              busy={steps.busy}
+              closed={closed !== null}
+              onAdoptRule={onAdoptRule}
+            />
+          ) : (
+            <CorrectedFix
+              office={office}
+              submission={submission.id}
+              finding={finding}
+              busy={steps.busy}
+              mayUndo={bench.may('corrections:undo')}
+              lastBatch={steps.last}
+              onUndo={() => void steps.undoFinding(finding)}
+            />
+          )}
+        </KeptFocus>
       </BenchSection>
       <BenchSection title="Rule">
         <p>
