@@ -1,4 +1,5 @@
-import { readSheets } from '@/parsers';
+import type { Sheet } from '@/lib/schedule/sheet';
+import { readSheets, UnreadableFile } from '@/parsers';
 import { type Dialect, readDialect } from '@/parsers/csv';
 import { changedCells } from './changed-cells';
 import { checkFile } from './check';
@@ -43,12 +44,16 @@ export function giveBack(input: GiveBackInput): GivenBack {
   const cells = changedCells(received, corrections);
   const dialect = isZip(bytes) ? null : readDialect(bytes).dialect;
   const patched = patch(input, cells, dialect);
-  const again = patched.bytes === bytes ? received : readSheets(patched.bytes, fileName);
+  const { sheets, remarks } =
+    patched.bytes === bytes ? { sheets: received, remarks: [] } : readAgain(patched, fileName);
   return {
     bytes: patched.bytes,
     fileName: correctedName(fileName),
     contentType: contentType(fileName, dialect),
-    check: checkFile(received, corrections, again, patched),
+    check: checkFile(received, corrections, sheets, {
+      ...patched,
+      remarks: [...patched.remarks, ...remarks],
+    }),
   };
 }
 
@@ -59,4 +64,14 @@ function patch(
 ): Patched {
   if (cells.length === 0) return { bytes, remarks: [], refused: [] };
   return dialect ? patchCsv(bytes, dialect, cells) : patchXlsx(bytes, cells, changes);
+}
+
+/** A list that was as long as a list may be can become too long by the sheet that lists its changes. */
+function readAgain({ bytes }: Patched, fileName: string): { sheets: Sheet[]; remarks: string[] } {
+  try {
+    return { sheets: readSheets(bytes, fileName), remarks: [] };
+  } catch (error) {
+    if (!(error instanceof UnreadableFile)) throw error;
+    return { sheets: [], remarks: [`The corrected file could not be read again. ${error.message}`] };
+  }
 }

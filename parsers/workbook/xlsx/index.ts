@@ -1,3 +1,4 @@
+import { LIMITS } from '@/parsers/limits';
 import { allChanges, changesByCell, noteText } from '../changes';
 import type { ChangedCell, ListedChange, Patched } from '../types';
 import { planSheet } from './actions';
@@ -99,7 +100,10 @@ export function patchXlsx(
   if (dropSignature(pack)) {
     remarks.push('The workbook was signed. A change makes a signature void, so it was taken out.');
   }
-  return { bytes: pack.toBytes(), remarks, refused: [] };
+  const quick = pack.toBytes();
+  // What is given back must not be too large to be sent in again.
+  const bytesOut = quick.length > LIMITS.fileBytes ? pack.toBytes('small') : quick;
+  return { bytes: bytesOut, remarks, refused: [] };
 }
 
 function calculationRemark(count: number): string {

@@ -19,6 +19,7 @@ import {
   type Element,
   escapeText,
   prefixOf,
+  relationId,
   rootOf,
   type Splice,
   splice,
@@ -80,19 +81,22 @@ export function addComments(xml: string, part: string, notes: readonly Note[]): 
   for (const comment of children(xml, list)) {
     here.set(attribute(xml.slice(comment.start, comment.inner), 'ref') ?? '', comment);
   }
-  const splices: Splice[] = [append(xml, authors, `<${prefix}author>${AUTHOR}</${prefix}author>`)];
+  const known = names.indexOf(AUTHOR);
+  const author = known < 0 ? names.length : known;
+  const splices: Splice[] =
+    known < 0 ? [append(xml, authors, `<${prefix}author>${AUTHOR}</${prefix}author>`)] : [];
   const [added, left, markup]: [Note[], string[], string[]] = [[], [], []];
   for (const note of notes) {
     const address = cellAddress(note);
     const comment = here.get(address);
-    const author =
+    const writer =
       comment && names[Number(attribute(xml.slice(comment.start, comment.inner), 'authorId') ?? 0)];
-    if (comment && THREAD.test(author ?? '')) left.push(address);
+    if (comment && THREAD.test(writer ?? '')) left.push(address);
     else if (comment) splices.push(...extend(xml, comment, prefix, note.text));
     else {
       added.push(note);
       const body = `<${prefix}text>${run(prefix, note.text)}</${prefix}text>`;
-      markup.push(`<${prefix}comment ref="${address}" authorId="${names.length}">${body}</${prefix}comment>`);
+      markup.push(`<${prefix}comment ref="${address}" authorId="${author}">${body}</${prefix}comment>`);
     }
   }
   if (markup.length > 0) splices.push(append(xml, list, markup.join('')));
@@ -103,19 +107,24 @@ export function addComments(xml: string, part: string, notes: readonly Note[]): 
 const AFTER =
   /^(?:legacyDrawingHF|drawingHF|picture|oleObjects|controls|webPublishItems|tableParts|extLst|AlternateContent)$/;
 
-/** Puts a name for the shapes of the notes into a sheet, at its place after the rows. */
-function drawingSplice(sheetXml: string, afterRows: number, dialect: Dialect, id: string): Splice {
+interface Drawing {
+  /** The relationship that names the shapes of the notes; null where the sheet has none. */
+  readonly id: string | null;
+  /** Where the element that names them belongs. */
+  readonly place: number;
+  readonly prefix: string;
+}
+
+function drawingOf(sheetXml: string, afterRows: number): Drawing {
   const root = rootOf(sheetXml);
+  const prefix = prefixOf(root?.name ?? '');
   const tail = { inner: afterRows, innerEnd: root?.innerEnd ?? sheetXml.length };
-  let at = tail.innerEnd;
-  for (const element of children(sheetXml, tail)) {
-    if (!AFTER.test(element.name.replace(/^.*:/, ''))) continue;
-    at = element.start;
-    break;
+  for (const { name, start, inner } of children(sheetXml, tail)) {
+    if (name === `${prefix}legacyDrawing`)
+      return { id: relationId(sheetXml.slice(start, inner)), place: start, prefix };
+    if (AFTER.test(name.replace(/^.*:/, ''))) return { id: null, place: start, prefix };
   }
-  const namespace = `xmlns:r="${dialect.relations.replace(/\/$/, '')}"`;
-  const text = `<${prefixOf(root?.name ?? '')}legacyDrawing ${namespace} r:id="${id}"/>`;
-  return { start: at, end: at, text };
+  return { id: null, place: tail.innerEnd, prefix };
 }
 
 export interface NotedSheet {
@@ -146,11 +155,15 @@ export function addNotes(
   }
   if (added.length === 0) return { splices: [], left };
 
-  const shapes = relations.find((relation) => isOfType(relation, 'vmlDrawing'))?.target;
+  // A picture in the header has shapes of its own, so the kind of relationship alone does not tell.
+  const drawing = drawingOf(sheet.xml, sheet.afterRows);
+  const shapes = relations.find((relation) => relation.id === drawing.id)?.target;
   const shapesPart = shapes ?? freeName(pack, 'xl/drawings/vmlDrawing', '.vml');
   writeXml(pack, shapesPart, addShapes(shapes ? readXml(pack, shapes) : null, added));
   if (shapes) return { splices: [], left };
   declareType(pack, '.vml', 'application/vnd.openxmlformats-officedocument.vmlDrawing');
   const id = addRelation(pack, sheet.part, `${dialect.relations}vmlDrawing`, shapesPart);
-  return { splices: [drawingSplice(sheet.xml, sheet.afterRows, dialect, id)], left };
+  const namespace = `xmlns:r="${dialect.relations.replace(/\/$/, '')}"`;
+  const text = `<${drawing.prefix}legacyDrawing ${namespace} r:id="${id}"/>`;
+  return { splices: [{ start: drawing.place, end: drawing.place, text }], left };
 }

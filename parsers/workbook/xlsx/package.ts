@@ -40,9 +40,12 @@ function kept(archive: ZipArchive, entry: ZipEntry): Part {
   };
 }
 
-/** Packing is most of the time that giving back takes, so large parts are packed faster and a little less. */
-function packed(bytes: Uint8Array, base: Part | null, name: string): Part {
-  const level = bytes.length > 8_000_000 ? 1 : bytes.length > 500_000 ? 3 : 6;
+/** `quick`: packing is most of the time that giving back takes, so large parts are packed faster and a little less. */
+export type Packing = 'quick' | 'small';
+
+function packed(bytes: Uint8Array, base: Part | null, name: string, packing: Packing): Part {
+  const quick = bytes.length > 8_000_000 ? 1 : bytes.length > 500_000 ? 3 : 6;
+  const level = packing === 'small' ? 9 : quick;
   const nameBytes = base?.nameBytes ?? Buffer.from(name);
   const flags = (base?.flags ?? 0) | (base ? 0 : UTF8_NAME);
   const { madeBy = 20, timeAndDate = FIRST_DATE, internal = 0, external = 0 } = base ?? {};
@@ -152,11 +155,11 @@ export class EditablePackage {
     this.slots.delete(keyOf(name));
   }
 
-  toBytes(): Buffer {
+  toBytes(packing: Packing = 'quick'): Buffer {
     return writeZip(
       [...this.slots.values()].flatMap(({ name, received, content }) => {
         const before = received ? kept(this.archive, received) : null;
-        return content ? packed(content, before, name) : (before ?? []);
+        return content ? packed(content, before, name, packing) : (before ?? []);
       }),
     );
   }

@@ -1,4 +1,5 @@
 import { describe, expect, it } from 'vitest';
+import { LIMITS } from '@/parsers/limits';
 import { giveBack } from '@/parsers/workbook';
 import { edit, give, withList } from '../giving';
 import { compareParts, makeWorkbook, override, partsOf, relation } from '../packages';
@@ -59,6 +60,13 @@ describe('the package', () => {
     expect(check.missing).toEqual([
       { sheet: 'Nowhere', cell: 'A1', reason: 'There is no cell A1 on a sheet “Nowhere”.' },
     ]);
+  });
+
+  it('says so where the list of changes makes the file too long to be read again', () => {
+    const full = '<row><c><v>1</v></c></row>'.repeat(LIMITS.rows + LIMITS.rowsAround);
+    const { check } = give(withList(`<sheetData>${full}</sheetData>`), edit('A1', 2));
+    expect(check.sentence).toBe('0 of 1 correction found in the file.');
+    expect(check.remarks[0]).toMatch(/could not be read again\. .* 200 000 rows/);
   });
 
   it('leaves a thread of comments as it is', () => {

@@ -47,6 +47,18 @@ describe('a package whose parts are changed', () => {
     expect(partsOf(pack.toBytes()).has('b.xml')).toBe(false);
   });
 
+  it('packs large parts quickly, or small where asked', () => {
+    const pack = new EditablePackage(bytes);
+    const rows = Array.from(
+      { length: 40_000 },
+      (_, index) => `<row r="${index}"><c>${(index * 7919) % 1009}</c></row>`,
+    );
+    pack.write('large.xml', Buffer.from(rows.join('')));
+    const [quick, small] = [pack.toBytes(), pack.toBytes('small')];
+    expect(small.length).toBeLessThan(quick.length);
+    expect(partsOf(small).get('large.xml')?.content).toBe(rows.join(''));
+  });
+
   it('gives the same bytes each time', () => {
     const write = () => {
       const pack = new EditablePackage(bytes);
