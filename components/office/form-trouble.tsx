@@ -12,12 +12,14 @@ export function fieldErrorsOf(error: unknown): Record<string, string> {
 export function FormTrouble({ error, fields }: { error: unknown; fields: readonly string[] }) {
   if (!error) return null;
   const errors = Object.entries(fieldErrorsOf(error));
-  const elsewhere = errors.filter(([path]) => !fields.includes(path));
+  const elsewhere = errors.filter(
+    ([path]) => !fields.some((field) => path === field || path.startsWith(`${field}.`)),
+  );
   const sentence =
     errors.length === 0
       ? sentenceOf(error)
       : elsewhere.length > 0
-        ? elsewhere.map(([, message]) => message).join(' ')
+        ? [...new Set(elsewhere.map(([, message]) => message))].join(' ')
         : errors.length === 1
           ? 'Nothing was saved: one field needs another look.'
           : `Nothing was saved: ${String(errors.length)} fields need another look.`;

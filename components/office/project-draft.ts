@@ -26,8 +26,7 @@ export const PROJECT_FIELDS = [
   'targetFinish',
   'unit',
   'hoursPerDay',
-  'holidays',
-  'calendar.workingDays',
+  'calendar',
 ];
 
 export const EMPTY_DRAFT: ProjectDraft = {
@@ -75,7 +74,10 @@ export function unitOf(text: string): Unit | null {
 }
 
 function calendarOf(draft: ProjectDraft): CalendarView {
-  const holidays = draft.holidays.split(/[\s,;]+/).filter((date) => date !== '');
+  const holidays = draft.holidays
+    .split(/[\n,;]+/)
+    .map((date) => date.trim())
+    .filter((date) => date !== '');
   return {
     workingDays: [...draft.workingDays].sort((a, b) => a - b),
     holidays: [...new Set(holidays)].sort(),

@@ -34,7 +34,7 @@ describe('toInput', () => {
 
 describe('holidayError', () => {
   it('names the date the server could not read', () => {
-    const draft = { ...EMPTY_DRAFT, holidays: '2027-12-24 24.12.2027' };
+    const draft = { ...EMPTY_DRAFT, holidays: '2027-12-24\n24.12.2027' };
     expect(holidayError({ 'calendar.holidays.1': 'x' }, draft)).toBe(
       '“24.12.2027” is no date; write it as 2027-12-24.',
     );
