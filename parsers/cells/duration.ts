@@ -36,6 +36,7 @@ export interface Duration {
   readonly readings: readonly number[];
 }
 
+const NO_READINGS: readonly number[] = [];
 const DASHES = /^[-\u2012-\u2015\u2212]+$/;
 const PART =
   /^([+\-\u2212\u2013]?[\d.,'\u2019/\u2044\u00bc-\u00be\u2150-\u215e ]*[\d.\u00bc-\u00be\u2150-\u215e](?:[eE][+-]?\d{1,2}(?![\p{L}\d]))?)\s*(\p{L}[\p{L} ./-]*)?$/u;
@@ -68,8 +69,20 @@ function readNumeric(value: number, { format, date1904 }: DurationCell, context:
   }
   if (kind === 'date') return fail('unreadable', text, value < SMALL_SERIAL ? [value] : []);
   if (kind === 'percent') return fail('unreadable', text);
-  const stated = readUnit(formatLiteral(format)) ?? context.header;
-  return inUnits([value], stated, text, context);
+  return inUnits([value], unitOfFormat(format) ?? context.header, text, context);
+}
+
+const unitsOfFormats = new Map<string, readonly WrittenUnit[] | null>();
+
+/** The unit that a number format shows beside the number. */
+function unitOfFormat(code: string): readonly WrittenUnit[] | null {
+  let units = unitsOfFormats.get(code);
+  if (units === undefined) {
+    units = readUnit(formatLiteral(code));
+    if (unitsOfFormats.size > 5000) unitsOfFormats.clear();
+    unitsOfFormats.set(code, units);
+  }
+  return units;
 }
 
 function readText(text: string, context: DurationContext): Duration {
@@ -90,12 +103,16 @@ function inUnits(
   text: string,
   { unit, options }: DurationContext,
 ): Duration {
+  const [only, other] = stated ?? [];
+  if (values.length === 1 && values[0] !== undefined && !other) {
+    const days = values[0] * (only?.times ?? 1) * daysIn(only?.unit ?? unit, options);
+    return done(days, text, only?.unit ?? null);
+  }
   const units = stated ?? [{ unit, times: 1 }];
   const days = units.flatMap((one) => values.map((value) => value * one.times * daysIn(one.unit, options)));
   const named = stated?.length === 1 ? (stated[0]?.unit ?? null) : null;
   if (units.length > 1) return fail('unreadable', text, days);
-  if (days.length > 1) return { ...fail('ambiguous', text, days), unit: named };
-  return done(days[0] ?? Number.NaN, text, named);
+  return { ...fail('ambiguous', text, days), unit: named };
 }
 
 /** Several numbers, each with its unit, as in `2w 3d`. */
@@ -118,9 +135,17 @@ function readSum(text: string, { mark, options }: DurationContext): Duration | n
 }
 
 function done(days: number, text: string, unit: Unit | null): Duration {
-  return Number.isFinite(days) ? { days, text, problem: null, unit, readings: [] } : fail('unreadable', text);
+  return Number.isFinite(days)
+    ? { days, text, problem: null, unit, readings: NO_READINGS }
+    : fail('unreadable', text);
 }
 
-function fail(problem: EstimateProblem, text: string, readings: readonly number[] = []): Duration {
-  return { days: null, text, problem, unit: null, readings: [...new Set(readings)] };
+function fail(problem: EstimateProblem, text: string, readings: readonly number[] = NO_READINGS): Duration {
+  return {
+    days: null,
+    text,
+    problem,
+    unit: null,
+    readings: readings.length > 1 ? [...new Set(readings)] : readings,
+  };
 }

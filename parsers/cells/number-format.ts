@@ -55,7 +55,7 @@ function digitsOf(
 
 /** A number without a format: fifteen digits, as a spreadsheet keeps them. */
 function plain(value: number): string {
-  return String(Number(value.toPrecision(15)));
+  return Number.isSafeInteger(value) ? String(value) : String(Number(value.toPrecision(15)));
 }
 
 function formatOf(code: string): Format {

@@ -4,11 +4,11 @@ import { ErrorValue } from '@/lib/schedule/sheet';
 const INVISIBLE = /[\u00ad\u200b-\u200f\u2060\ufeff]/g;
 const BLANKS = /[\s\u00a0\u2000-\u200a\u202f\u205f\u3000]+/g;
 const HYPHENS = /[\u2010\u2011]/g;
-const NEEDS_CLEANING = /[^\x21-\x7e]/;
+const IS_CLEAN = /^(?:[\x21-\x7e]+(?: [\x21-\x7e]+)*)?$/;
 
 /** The text without blanks around it and invisible characters, every run of blanks one space. */
 export function clean(text: string): string {
-  if (!NEEDS_CLEANING.test(text)) return text;
+  if (IS_CLEAN.test(text)) return text;
   return text.replace(INVISIBLE, '').replace(BLANKS, ' ').replace(HYPHENS, '-').trim();
 }
 

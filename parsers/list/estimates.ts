@@ -82,8 +82,9 @@ export class EstimateReader {
     const context = this.contexts.get(field);
     const cell = this.cells.ref(row, field);
     if (!context || !cell) return NO_COLUMN;
-    const duration = readDuration(this.cells.durationCell(row, field), context);
-    return { ...duration, content: toContent(this.cells.value(row, field)), cell };
+    const source = this.cells.durationCell(row, field);
+    const { days, text, problem, unit, readings } = readDuration(source, context);
+    return { days, text, content: toContent(source.value), cell, problem, unit, readings };
   }
 
   private contextOf(field: EstimateField, rows: readonly SheetRow[]): DurationContext {

@@ -100,6 +100,13 @@ export function isRemark(text: string): boolean {
   return REMARK.test(text) || text.length > 90 || (words > 5 && /[.!]$/.test(text)) || words > 12;
 }
 
+/** Whether nothing but a remark stands in a row, in whatever column. */
+export function isLoneRemark({ cells }: SheetRow): boolean {
+  const held = cells.filter((value) => !isBlank(value));
+  const [only] = held;
+  return held.length === 1 && typeof only === 'string' && isRemark(clean(only));
+}
+
 /** Whether every estimate a row gives is rolled up from other rows by its formula. */
 export function isRolledUp({ row, estimates }: RowFacts, cells: SheetCells): boolean {
   if (cells.sheet.formulas.size === 0) return false;

@@ -2,7 +2,7 @@ import type { Activity } from '@/lib/schedule/activity';
 import type { HeadingRow, RefusedRow, RowCounts } from '@/lib/schedule/activity-list';
 import type { SheetRow } from '@/lib/schedule/sheet';
 import { toContent } from '@/parsers/cells/text';
-import { isRemark, isRolledUp, isTotalLabel, type RowFacts, HeaderRepeats } from './row-facts';
+import { isLoneRemark, isRemark, isRolledUp, isTotalLabel, type RowFacts, HeaderRepeats } from './row-facts';
 import type { SheetCells } from './sheet-cells';
 
 export type RowKind = 'activity' | 'heading' | 'continued' | 'blank' | 'note' | 'refused';
@@ -61,7 +61,7 @@ export class RowSorter {
 
   private sort(cells: SheetCells, row: SheetRow, facts: RowFacts): void {
     const hasId = facts.id !== '' || facts.idError !== null;
-    if (this.isTotal(cells, facts)) this.put(cells, row, facts, 'note');
+    if (isLoneRemark(row) || this.isTotal(cells, facts)) this.put(cells, row, facts, 'note');
     else if (this.continues(facts)) this.put(cells, row, facts, 'continued');
     else if (facts.hasEstimates) {
       const isHeading = !facts.hasLinks && (hasId || facts.name !== '') && isRolledUp(facts, cells);
