@@ -1,27 +1,11 @@
-import type { AuditContext, Rule } from '../rule';
+import type { Rule } from '../rule';
 import { aboutActivity, at } from '../support/about';
-import { groupsOf } from '../support/groups';
-import { intended } from '../support/intended';
+import { detachedGroups } from '../support/groups';
 import { GAO_LOGIC } from '../support/sources';
 import { capital, called, joined, listIn } from '../support/words';
 
 /** How many IDs a finding keeps; the count says the rest. */
 const KEPT = 50;
-
-/**
- * Groups of two or more beside the largest (of two as large, the one that begins first). An activity alone is
- * no group: it is an open start and an open finish. Nor is one detached whose links are there and cannot be
- * read: another rule has those.
- */
-function detached(context: AuditContext): number[][] {
-  const { obscure } = intended(context);
-  const groups = groupsOf(context).filter(({ length }) => length > 1);
-  const largest = groups.reduce(
-    (best, group) => (group.length > best.length ? group : best),
-    groups[0] ?? [],
-  );
-  return groups.filter((group) => group !== largest && !group.some((one) => obscure.has(one)));
-}
 
 export const rule: Rule = {
   id: 'detached-group',
@@ -39,7 +23,7 @@ export const rule: Rule = {
   limits: {},
   check(context) {
     const { list } = context;
-    return detached(context).flatMap((group) => {
+    return detachedGroups(context).flatMap((group) => {
       const activities = group.flatMap((index) => list.activities[index] ?? []);
       const [first] = activities;
       if (!first) return [];

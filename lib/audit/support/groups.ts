@@ -1,5 +1,6 @@
 import type { AuditContext } from '../rule';
 import { intended } from './intended';
+import { memo } from './memo';
 
 function find(parent: Int32Array, activity: number): number {
   let root = activity;
@@ -12,7 +13,7 @@ function find(parent: Int32Array, activity: number): number {
 }
 
 /** Activities joined by links in whatever direction, links that are meant but wrongly written included. */
-export function groupsOf(context: AuditContext): number[][] {
+function groupsOf(context: AuditContext): number[][] {
   const { list } = context;
   const parent = Int32Array.from(list.activities, (_, index) => index);
   const join = (one: number, other: number) => {
@@ -29,3 +30,18 @@ export function groupsOf(context: AuditContext): number[][] {
   });
   return [...groups.values()];
 }
+
+/**
+ * Groups of two or more beside the largest (of two as large, the one that begins first). An activity alone is
+ * no group: it is an open start and an open finish. Nor is one detached whose links are there and cannot be
+ * read: another rule has those.
+ */
+export const detachedGroups = memo((context: AuditContext): number[][] => {
+  const { obscure } = intended(context);
+  const groups = groupsOf(context).filter(({ length }) => length > 1);
+  const largest = groups.reduce(
+    (best, group) => (group.length > best.length ? group : best),
+    groups[0] ?? [],
+  );
+  return groups.filter((group) => group !== largest && !group.some((one) => obscure.has(one)));
+});

@@ -2,6 +2,7 @@ import type { Activity } from '@/lib/schedule/activity';
 import type { AuditContext } from '../rule';
 import { canBeNamed } from './about';
 import { takesNoTime } from './estimate-cells';
+import { detachedGroups } from './groups';
 import { intended } from './intended';
 import { memo } from './memo';
 
@@ -19,17 +20,22 @@ interface Open {
   readonly activity: Activity;
   /** Nothing before and nothing after it. */
   readonly alone: boolean;
+  /** In a group that has no link to the rest. */
+  readonly detached: boolean;
 }
 
 /**
- * A milestone (it takes no time), else the first or the last. A milestone without any link could be either:
+ * A milestone (it takes no time), else the first or the last; in a group without a link to the rest only where
+ * there is no other. A milestone without any link could be either:
  * in the upper half of the list it counts as a start, in the lower half as a finish.
  */
 function pick(open: readonly Open[], rows: number, end: 'start' | 'finish', not: Activity | null) {
   const inHalf = ({ index }: Activity) => (end === 'start' ? index < rows / 2 : index >= rows / 2);
   const others = open.filter(({ activity }) => activity !== not);
-  const candidates = (others.length > 0 ? others : open).toSorted((one, other) =>
-    end === 'start' ? one.activity.index - other.activity.index : other.activity.index - one.activity.index,
+  const attached = others.filter(({ detached }) => !detached);
+  const candidates = (attached.length > 0 ? attached : others.length > 0 ? others : open).toSorted(
+    (one, other) =>
+      end === 'start' ? one.activity.index - other.activity.index : other.activity.index - one.activity.index,
   );
   const milestone = candidates.find(
     ({ activity, alone }) => takesNoTime(activity) && (!alone || inHalf(activity)),
@@ -55,8 +61,10 @@ export const openEnds = memo((context: AuditContext): OpenEnds => {
     if (linksOutOf[index]?.some(isLink)) hasAfter.add(index);
   });
   const nameable = list.activities.filter((activity) => canBeNamed(list, activity));
+  const inDetached = new Set(detachedGroups(context).flat());
   const toOpen = (activity: Activity): Open => ({
     activity,
+    detached: inDetached.has(activity.index),
     alone: !hasBefore.has(activity.index) && !hasAfter.has(activity.index),
   });
   const starts = nameable.filter(({ index }) => !hasBefore.has(index)).map(toOpen);

@@ -16,7 +16,8 @@ export interface Reading {
   readonly links: readonly ReadLink[];
 }
 
-const ENTRY = /^(.*?)\s*(?:\b(FS|SS|FF|SF))?\s*([+\-\u2212\u2013]\s*\d[\d.,]*\s*\p{L}*)?$/iu;
+/** What may follow an ID: a relation, a lag, or both. */
+const REST = /^\s*(FS|SS|FF|SF)?\s*([+\-\u2212\u2013]\s*\d[\d.,]*\s*\p{L}*)?$/iu;
 const LAG = /^([+\-\u2212\u2013])\s*(\d[\d.,]*)\s*(\p{L}*)$/u;
 const UNIT_OF = { d: 'day', h: 'hour', w: 'week' } as const;
 
@@ -32,12 +33,25 @@ function lagDays(text: string | undefined, list: ActivityList): number {
 const relationOf = (text: string | undefined): Relation =>
   RELATIONS.find((relation) => relation === text?.toUpperCase()) ?? 'FS';
 
+/** An ID stands within so many characters. */
+const LONGEST_ID = 80;
+
+/** The longest beginning that is an ID, with what follows it. */
+function splitId(text: string, list: ActivityList): { activity: number; rest: string } | null {
+  for (let end = Math.min(text.length, LONGEST_ID); end > 0; end--) {
+    if (/^[\p{L}\p{N}]{2}$/u.test(text.slice(end - 1, end + 1))) continue;
+    const activity = list.indexOf.get(text.slice(0, end).trimEnd());
+    if (activity !== undefined) return { activity, rest: text.slice(end) };
+  }
+  return null;
+}
+
 function toLink(text: string, list: ActivityList): ReadLink | null {
-  const literal = list.indexOf.get(text);
-  if (literal !== undefined) return { activity: literal, type: 'FS', lag: 0 };
-  const [, id = '', relation, lag] = ENTRY.exec(text) ?? [];
-  const activity = list.indexOf.get(id);
-  return activity === undefined ? null : { activity, type: relationOf(relation), lag: lagDays(lag, list) };
+  const split = splitId(text, list);
+  const match = split && REST.exec(split.rest);
+  return match
+    ? { activity: split.activity, type: relationOf(match[1]), lag: lagDays(match[2], list) }
+    : null;
 }
 
 /** Null where part of the reading names no activity of the list. */
@@ -55,18 +69,10 @@ export function readingsOf(item: LinkItem, owner: number, list: ActivityList): R
   });
 }
 
-/** An ID that stands first in an entry stands within so many characters. */
-const LONGEST_ID = 80;
-
 /** The activities an unreadable entry seems to speak of: by its first reading, else by the ID it begins with. */
 export function spokenOf(item: LinkItem, owner: number, list: ActivityList): number[] {
   const [reading] = readingsOf(item, owner, list);
   if (reading) return reading.links.map(({ activity }) => activity);
-  for (let end = Math.min(item.text.length, LONGEST_ID); end > 0; end--) {
-    const cut = item.text.slice(end - 1, end + 1);
-    if (cut.length === 2 && /^[\p{L}\p{N}]{2}$/u.test(cut)) continue;
-    const activity = list.indexOf.get(item.text.slice(0, end).trim());
-    if (activity !== undefined && activity !== owner) return [activity];
-  }
-  return [];
+  const split = splitId(item.text, list);
+  return split && split.activity !== owner ? [split.activity] : [];
 }

@@ -25,6 +25,11 @@ describe('open-finish', () => {
     ]);
   });
 
+  it('seeks the finish outside a group that has no link to the rest', () => {
+    const received = list('A 1 2 3', 'B 1 2 3 <- A', 'C 1 2 3 <- B', 'X 1 2 3', 'Y 1 2 3 <- X');
+    expect(found('open-finish', received).map(({ fix }) => writes(fix))).toEqual([[['F4', 'B', 'B, Y']]]);
+  });
+
   it('writes among the successors where the list gives those', () => {
     const matching = { sheet: 'Activities', headerRow: 1, columns: { id: 0, likely: 3, successors: 6 } };
     const received = { ...list('A 1 2 3 -> B, C', 'B 1 2 3', 'C 1 2 3'), matching: [matching] };

@@ -50,6 +50,20 @@ describe('unreadable-predecessor', () => {
     expect(finding!.fix?.changes).toEqual([{ kind: 'add-link', from: 0, to: 2, type: 'SS', lag: -10 }]);
   });
 
+  it('reads an ID that holds a hyphen and digits before a relation', () => {
+    const hyphens = list('M-010 1 2 3', 'M-020 1 2 3 <- M-010 FS+ 1 2');
+    const [finding] = found('unreadable-predecessor', withReadings(hyphens, 'M-010 FS+ 1 2', ['M-010 FS']));
+    expect(finding!.fix?.edits[0]?.to).toBe('M-010 FS');
+  });
+
+  it('puts several entries in place of one where that is what is meant', () => {
+    const range = list('A 1 2 3', 'B 1 2 3 <- A', 'C 1 2 3 <- all of A and B');
+    const several = withReadings(range, 'all of A and B', ['A, B']);
+    const [finding] = found('unreadable-predecessor', several);
+    expect(finding!.fix?.edits[0]?.to).toBe('A, B');
+    expect(finding!.fix?.changes).toHaveLength(2);
+  });
+
   it('is the only finding: what the entry speaks of is no open end', () => {
     expect(keys(list('A 1 2 3', 'B 1 2 3 <- A (by crane)', 'C 1 2 3 <- B'))).toEqual([
       'unreadable-predecessor|B|A (by crane)',
