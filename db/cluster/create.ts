@@ -65,11 +65,19 @@ export async function createCluster(
         cwd: folder,
         env: bareEnvironment(),
       });
-    await init('C.UTF-8').catch(async (error: Error) => {
-      if (!/locale/i.test(error.message)) throw error;
-      await rm(data, { recursive: true, force: true });
-      return init('C');
-    });
+    await init('C.UTF-8')
+      .catch(async (error: Error) => {
+        if (!/invalid locale/i.test(error.message)) throw error;
+        await rm(data, { recursive: true, force: true });
+        return init('C');
+      })
+      .catch((error: Error) => {
+        if (/No space left on device/.test(error.message)) {
+          throw new Refusal('There is no space left on the disk for the database.');
+        }
+        const said = error.message.trim().split('\n').slice(-6).join('\n');
+        throw new Refusal(`The database could not be made in ${folder}:\n${said}`);
+      });
     await writeFile(join(data, 'pg_hba.conf'), WHO_MAY_CONNECT);
   } finally {
     await rm(passwordFile, { force: true });

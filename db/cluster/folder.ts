@@ -1,5 +1,5 @@
 import { randomBytes } from 'node:crypto';
-import { chmod, chown, lstat, mkdir, readlink, realpath, rm, symlink } from 'node:fs/promises';
+import { chmod, chown, lstat, mkdir, readlink, realpath, rm, stat, symlink } from 'node:fs/promises';
 import { dirname, join } from 'node:path';
 import { type Account, canReach } from './account';
 
@@ -8,8 +8,21 @@ const ELSEWHERE = '/var/lib/plumbrow';
 
 /** Makes the folder everything local is kept in. Others may pass through it, and read nothing. */
 export async function makeHome(home: string): Promise<void> {
-  const made = await mkdir(home, { recursive: true });
-  if (made !== undefined) await chmod(home, 0o711);
+  if (await makeFolder(home)) await chmod(home, 0o711);
+}
+
+/** With those above it, one by one: the recursive form of `mkdir` never ends where none can be made (under /proc). */
+async function makeFolder(folder: string): Promise<boolean> {
+  const present = await stat(folder).catch(() => null);
+  if (present?.isDirectory()) return false;
+  if (!present && dirname(folder) !== folder) await makeFolder(dirname(folder));
+  return mkdir(folder).then(
+    () => true,
+    (error: NodeJS.ErrnoException) => {
+      if (error.code === 'EEXIST' && !present) return false; // Another was making it at the same time.
+      throw error;
+    },
+  );
 }
 
 /**

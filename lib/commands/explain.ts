@@ -17,6 +17,7 @@ export function explain(error: unknown): string {
     case 'EACCES':
     case 'EPERM':
     case 'EROFS':
+    case 'ENOENT':
       return `The folder cannot be written to${place}: allow it, or set PLUMBROW_HOME to another one.`;
     case 'EEXIST':
     case 'ENOTDIR':
