@@ -60,7 +60,7 @@ export function readCsv(bytes: Uint8Array): Sheet {
  */
 function cellText(value: string): string {
   const text = value.includes('\r') ? value.replace(/\r\n?/g, '\n') : value;
-  if (/^'+[=+\-@\t\n]/.test(text)) return text.slice(1);
+  if (text.startsWith("'") && /^'+[=+\-@\t\n]/.test(text)) return text.slice(1);
   if (!text.startsWith('="')) return text;
   return /^="([^"]*)"$/.exec(text)?.[1] ?? text;
 }
