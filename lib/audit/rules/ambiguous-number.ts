@@ -1,5 +1,5 @@
 import type { Rule } from '../rule';
-import { doubtfulDefect } from '../support/doubtful';
+import { doubtOf } from '../support/doubtful';
 import { estimateCells } from '../support/estimate-cells';
 import { PRACTICE } from '../support/sources';
 import { joinedIn } from '../support/words';
@@ -23,7 +23,7 @@ export const rule: Rule = {
       estimateCells(activity, list)
         .filter(({ estimate }) => estimate.problem === 'ambiguous')
         .map((cell) => {
-          const { readings: _, ...defect } = doubtfulDefect(list, activity, cell);
+          const { defect } = doubtOf(list, activity, cell);
           const unknown = cell.parts.includes('likely') && cell.estimate.days === null;
           return { ...defect, message: 'several', ...(unknown ? { weight: 'blocks' as const } : {}) };
         }),

@@ -15,9 +15,9 @@ import { called, capital, joined, joinedIn } from '../support/words';
 const OFFERED = 5;
 
 const HOW: Record<Nearness, string> = {
-  letters: 'it differs in case, blanks or dashes alone',
-  lookalike: 'it differs in leading zeros, or in signs that look alike, alone',
-  edit: 'it is one slip of the keyboard away',
+  letters: 'it differs only in case, blanks or dashes',
+  lookalike: 'it differs only in leading zeros or in signs that look alike',
+  edit: 'it is one character away',
 };
 
 const UNFIT = {

@@ -1,5 +1,5 @@
 import type { Rule } from '../rule';
-import { doubtfulDefect } from '../support/doubtful';
+import { doubtOf } from '../support/doubtful';
 import { estimateCells } from '../support/estimate-cells';
 import { PRACTICE } from '../support/sources';
 import { joinedIn } from '../support/words';
@@ -16,7 +16,7 @@ export const rule: Rule = {
       none: (data) =>
         `“${data.text}” in ${data.cell} is no duration, so the ${data.name} of ${data.id} is not known.`,
       one: (data) =>
-        `“${data.text}” in ${data.cell}, the ${data.name} of ${data.id}, cannot be read as it stands; ${joinedIn(data, 'readings')} seems to be meant.`,
+        `“${data.text}” in ${data.cell}, the ${data.name} of ${data.id}, cannot be read as it stands; ${joinedIn(data, 'likely')} seems to be meant.`,
       several: (data) =>
         `“${data.text}” in ${data.cell}, the ${data.name} of ${data.id}, can be read as ${joinedIn(data, 'readings', 'or')}.`,
       formula: (data) =>
@@ -29,10 +29,10 @@ export const rule: Rule = {
       estimateCells(activity, list)
         .filter(({ estimate }) => estimate.problem === 'unreadable')
         .map((cell) => {
-          const { readings, ...defect } = doubtfulDefect(list, activity, cell);
-          const count = readings.length === 0 ? 'none' : readings.length === 1 ? 'one' : 'several';
+          const { defect, likely } = doubtOf(list, activity, cell);
+          const count = likely.length === 0 ? 'none' : likely.length === 1 ? 'one' : 'several';
           const isFormula = cell.estimate.text.trim() === '' || cell.estimate.text.startsWith('=');
-          return { ...defect, message: readings.length === 0 && isFormula ? 'formula' : count };
+          return { ...defect, message: likely.length === 0 && isFormula ? 'formula' : count };
         }),
     );
   },

@@ -1,7 +1,8 @@
-import type { Network } from '@/lib/network';
 import type { ActivityList, HeadingRow } from '@/lib/schedule/activity-list';
 import type { AuditContext } from '../rule';
+import { headingsById } from './heading-ids';
 import { memo } from './memo';
+import { endsWith, unknownLinks } from './unknown-links';
 
 /** The activities under a heading: positions from … to − 1. */
 interface Range {
@@ -52,26 +53,47 @@ function endRow(list: ActivityList, position: number): number {
   return Infinity;
 }
 
-function endsOf(network: Network, { from, to }: Range): Pick<HeadingEnds, 'first' | 'last'> {
-  const inside = (activity: number | undefined) =>
-    activity !== undefined && activity >= from && activity < to;
-  const free = (neighbours: Int32Array, starts: Int32Array, activity: number) =>
-    !neighbours.subarray(starts[activity], starts[activity + 1]).some(inside);
-  const members = Array.from({ length: Math.max(0, to - from) }, (_, i) => from + i);
-  return {
-    first: members.filter((activity) => free(network.predecessor, network.predecessorStart, activity)),
-    last: members.filter((activity) => free(network.successor, network.successorStart, activity)),
+/** Pairs that are linked, or are meant to be and named by a slip. */
+function pairsOf(context: AuditContext): Pairs {
+  const after = new Map<number, number[]>();
+  const before = new Map<number, number[]>();
+  const put = (pairs: Map<number, number[]>, one: number, other: number) => {
+    const known = pairs.get(one);
+    if (known) known.push(other);
+    else pairs.set(one, [other]);
   };
+  for (const unknown of unknownLinks(context)) {
+    const meant = unknown.unnamed ?? unknown.near[0];
+    if (!meant) continue;
+    const [from, to] = endsWith(unknown, meant.index);
+    put(after, from, to);
+    put(before, to, from);
+  }
+  return { after, before };
 }
 
-/** Headings by ID, where no activity bears it. */
-export const headingsById = memo((list: ActivityList) => {
-  const byId = new Map<string, number>();
-  list.headings.forEach(({ id }, position) => {
-    if (id !== '' && !list.indexOf.has(id) && !byId.has(id)) byId.set(id, position);
-  });
-  return byId;
-});
+interface Pairs {
+  readonly after: ReadonlyMap<number, readonly number[]>;
+  readonly before: ReadonlyMap<number, readonly number[]>;
+}
+
+function endsOf(
+  { network }: AuditContext,
+  pairs: Pairs,
+  { from, to }: Range,
+): Pick<HeadingEnds, 'first' | 'last'> {
+  const inside = (activity: number) => activity >= from && activity < to;
+  const isFirst = (activity: number) =>
+    !network.predecessor
+      .subarray(network.predecessorStart[activity], network.predecessorStart[activity + 1])
+      .some(inside) && !pairs.before.get(activity)?.some(inside);
+  const isLast = (activity: number) =>
+    !network.successor
+      .subarray(network.successorStart[activity], network.successorStart[activity + 1])
+      .some(inside) && !pairs.after.get(activity)?.some(inside);
+  const members = Array.from({ length: Math.max(0, to - from) }, (_, i) => from + i);
+  return { first: members.filter(isFirst), last: members.filter(isLast) };
+}
 
 const linkedIds = (list: ActivityList) =>
   new Set(
@@ -79,17 +101,19 @@ const linkedIds = (list: ActivityList) =>
   );
 
 /** For each heading that a link names, by its ID: the activities with which what is under it begins and ends. */
-export const linkedHeadings = memo(({ list, network }: AuditContext): ReadonlyMap<string, HeadingEnds> => {
+export const linkedHeadings = memo((context: AuditContext): ReadonlyMap<string, HeadingEnds> => {
+  const { list } = context;
   const ends = new Map<string, HeadingEnds>();
   if (headingsById(list).size === 0) return ends;
   const sheets = sheetRanges(list);
+  const pairs = pairsOf(context);
   for (const id of linkedIds(list)) {
     const position = headingsById(list).get(id);
     const heading = position === undefined ? undefined : list.headings[position];
     if (position === undefined || !heading) continue;
     const from = firstBelow(list, sheets, heading.sheet, heading.row);
     const to = firstBelow(list, sheets, heading.sheet, endRow(list, position) - 1);
-    ends.set(id, { heading, ...endsOf(network, { from, to }) });
+    ends.set(id, { heading, ...endsOf(context, pairs, { from, to }) });
   }
   return ends;
 });

@@ -26,8 +26,8 @@ interface Open {
 
 /**
  * A milestone (it takes no time), else the first or the last; in a group without a link to the rest only where
- * there is no other. A milestone without any link could be either:
- * in the upper half of the list it counts as a start, in the lower half as a finish.
+ * there is no other. A milestone without any link could be either: in the upper half of the list it counts as a
+ * start, in the lower half as a finish.
  */
 function pick(open: readonly Open[], rows: number, end: 'start' | 'finish', not: Activity | null) {
   const inHalf = ({ index }: Activity) => (end === 'start' ? index < rows / 2 : index >= rows / 2);

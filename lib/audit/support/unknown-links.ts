@@ -2,7 +2,7 @@ import type { Activity, Link } from '@/lib/schedule/activity';
 import type { AuditContext } from '../rule';
 import { freeIds } from './free-ids';
 import { wouldLoop } from './graph';
-import { headingsById } from './headings';
+import { headingsById } from './heading-ids';
 import { memo } from './memo';
 import { type Nearness, nearestTo } from './nearest';
 

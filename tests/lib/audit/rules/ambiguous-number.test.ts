@@ -33,7 +33,10 @@ describe('ambiguous-number', () => {
 
   it('proposes the reading that alone keeps a ≤ m ≤ b', () => {
     const narrow = withEstimate(list('A 1 2 3', 'B 1 2 3 <- A'), 1, 'likely', estimate);
-    expect(writes(found('ambiguous-number', narrow)[0]!.fix)).toEqual([['D3', '1,234', '1.2340']]);
+    const [finding] = found('ambiguous-number', narrow);
+    expect(writes(finding!.fix)).toEqual([['D3', '1,234', '1.2340']]);
+    expect(sentence(finding!)).toContain('can be read as 1.2 days or 1234 days');
+    expect(finding!.alternatives?.map((fix) => writes(fix))).toEqual([[['D3', '1,234', '1234']]]);
   });
 
   it('keeps the decimal comma and the unit of the column', () => {

@@ -47,6 +47,11 @@ describe('heading-link', () => {
     expect(finding!.fix?.edits[0]?.to).toBe('F1');
   });
 
+  it('reckons with a link under the heading that is meant and wrongly written', () => {
+    const received = list('# H1 "Piers"', 'P1 1', 'P2 1 <- p1', '# H2 "Deck"', 'D1 1 <- H1');
+    expect(found('heading-link', received)[0]!.fix?.edits[0]?.to).toBe('P2');
+  });
+
   it('offers the removal alone where the activity itself stands under the heading, or nothing does', () => {
     const own = found('heading-link', list('# H1 "Piers"', 'P1 1 2 3', 'P2 1 2 3 <- H1, P1'))[0]!;
     expect(own).not.toHaveProperty('fix');
