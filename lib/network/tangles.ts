@@ -3,8 +3,8 @@ import { cheapestCut } from './cut/fewest';
 import { type Budget, type CutGraph, cutGraph, type Edge, Walker } from './cut/graph';
 import type { Network, Tangle } from './types';
 
-/** Edges that may be looked at for all tangles of a list: about a second where it is used up. */
-const WORK = 30_000_000;
+/** Edges that may be looked at for all tangles of a list: about half a second where it is used up. */
+const WORK = 10_000_000;
 
 /**
  * The tangles of a network, by their first activity: activities that wait for one another in a ring. Each with

@@ -5,6 +5,7 @@ import { forwardPass, times } from '../passes';
 import { plan } from '../plan';
 import type { Network } from '../types';
 import { LocalOrder } from './local-order';
+import { Moved } from './moved';
 import { RankQueue } from './rank-queue';
 import { WorkingNetwork } from './working';
 
@@ -36,6 +37,7 @@ interface Base {
   readonly working: WorkingNetwork;
   readonly order: LocalOrder;
   readonly queue: RankQueue;
+  readonly moved: Moved;
   readonly lateStart: Float64Array;
   /** Activities from the latest early finish to the earliest. */
   readonly byFinish: Int32Array;
@@ -51,31 +53,25 @@ function prepareBase(network: Network): Base | null {
   for (const activity of ordered.order) working.evaluate(activity);
   const byFinish = ordered.order.slice().sort((a, b) => earlyFinish[b]! - earlyFinish[a]!);
   const order = new LocalOrder(ordered.order, ordered.rank);
-  const figures = figuresOf(working, byFinish, new Map());
-  return { working, order, queue: new RankQueue(network.count), lateStart, byFinish, ...figures };
+  const moved = new Moved(working);
+  const figures = figuresOf(working, byFinish, moved);
+  return { working, order, queue: new RankQueue(network.count), moved, lateStart, byFinish, ...figures };
 }
 
-/** Early start and chain variance that an activity had before the changes. */
-type Before = Map<number, { readonly earlyStart: number; readonly chainVariance: number }>;
-
 function effectOf(base: Base, changes: readonly NetworkChange[]): Effect | null {
-  const { working, order } = base;
-  const before: Before = new Map();
+  const { working, order, moved } = base;
   const reach = reachOf(base, changes);
   for (const change of changes) working.apply(change);
   try {
     if (!working.added.every((link) => order.admit(link, working))) return null;
-    propagate(base, changes, reach, before);
-    const { finish, variance } = figuresOf(working, base.byFinish, before);
+    propagate(base, changes, reach);
+    const { finish, variance } = figuresOf(working, base.byFinish, moved);
     return {
       expectedDuration: withoutNoise(finish - base.finish),
       variance: withoutNoise(variance - base.variance),
     };
   } finally {
-    for (const [activity, { earlyStart, chainVariance }] of before) {
-      working.earlyStart[activity] = earlyStart;
-      working.chainVariance[activity] = chainVariance;
-    }
+    moved.undo();
     working.undo();
     order.undo();
   }
@@ -103,10 +99,7 @@ function reachOf({ working, lateStart }: Base, changes: readonly NetworkChange[]
     } else if (change.kind !== 'add-link') {
       const position = working.position(change.link);
       if (position === -1) continue;
-      const to = working.successorAt(position);
-      const from = network.predecessor[position]!;
-      const slack = earlyStart[to]! - (earlyStart[from]! + working.weight(position, to));
-      if (isFree(to) || slack > MARGIN) continue;
+      if (isFree(working.successorAt(position)) || working.slackAt(position) > MARGIN) continue;
       reach += change.kind === 'remove-link' ? Infinity : Math.max(0, network.lag[position]! - change.lag);
     }
   }
@@ -114,10 +107,10 @@ function reachOf({ working, lateStart }: Base, changes: readonly NetworkChange[]
 }
 
 /** Works out anew what the changes touch and what follows from it, in order. */
-function propagate(base: Base, changes: readonly NetworkChange[], reach: number, before: Before): void {
-  const { working, order, queue, lateStart } = base;
+function propagate(base: Base, changes: readonly NetworkChange[], reach: number): void {
+  const { working, order, queue, moved, lateStart } = base;
   const { successorStart, successor, successorPosition, predecessor } = working.network;
-  const { earlyStart, chainVariance, removed } = working;
+  const { earlyStart, chainVariance, altered, added } = working;
   const { rank } = order;
   // Behind the last change nothing has another way to the finish than it had.
   let lastChange = -1;
@@ -125,8 +118,8 @@ function propagate(base: Base, changes: readonly NetworkChange[], reach: number,
     queue.add(rank[to]!);
     lastChange = Math.max(lastChange, rank[from]!);
   };
-  for (const activity of working.altered) touch(activity, activity);
-  for (const { from, to } of working.added) touch(from, to);
+  for (const activity of altered) touch(activity, activity);
+  for (const { from, to } of added) touch(from, to);
   for (const change of changes) {
     if (change.kind !== 'remove-link' && change.kind !== 'change-lag') continue;
     const position = working.position(change.link);
@@ -134,26 +127,26 @@ function propagate(base: Base, changes: readonly NetworkChange[], reach: number,
   }
   for (let r = queue.take(); r !== -1; r = queue.take()) {
     const activity = order.order[r]!;
-    const was = { earlyStart: earlyStart[activity]!, chainVariance: chainVariance[activity]! };
-    const isAltered = working.altered.has(activity);
-    if (!working.evaluate(activity) && !isAltered) continue;
-    before.set(activity, was);
-    const latest = Math.max(was.earlyStart, earlyStart[activity]!);
+    const startBefore = earlyStart[activity]!;
+    const varianceBefore = chainVariance[activity]!;
+    if (!working.evaluate(activity) && !altered.has(activity)) continue;
+    moved.add(activity, startBefore, varianceBefore);
+    const latest = Math.max(startBefore, earlyStart[activity]!);
     if (r > lastChange && lateStart[activity]! - latest > reach + MARGIN) continue;
     for (let k = successorStart[activity]!; k < successorStart[activity + 1]!; k++) {
       // A removed link may run against the mended order.
-      if (removed[successorPosition[k]!] === 0) queue.add(rank[successor[k]!]!);
+      if (!working.isRemoved(successorPosition[k]!)) queue.add(rank[successor[k]!]!);
     }
-    for (const link of working.added) if (link.from === activity) queue.add(rank[link.to]!);
+    for (const link of added) if (link.from === activity) queue.add(rank[link.to]!);
   }
 }
 
 /** The finish and the largest variance of a chain that sets it. */
-function figuresOf(working: WorkingNetwork, byFinish: Int32Array, moved: Before) {
+function figuresOf(working: WorkingNetwork, byFinish: Int32Array, moved: Moved) {
   const { earlyStart, duration, chainVariance } = working;
   const earlyFinish = (activity: number) => earlyStart[activity]! + duration[activity]!;
   let finish = byFinish.length > 0 ? -Infinity : 0;
-  for (const activity of moved.keys()) finish = Math.max(finish, earlyFinish(activity));
+  for (const activity of moved.activities) finish = Math.max(finish, earlyFinish(activity));
   const still = byFinish.find((activity) => !moved.has(activity));
   if (still !== undefined) finish = Math.max(finish, earlyFinish(still));
   let variance = 0;
@@ -162,7 +155,7 @@ function figuresOf(working: WorkingNetwork, byFinish: Int32Array, moved: Before)
     if (sets) variance = Math.max(variance, chainVariance[activity]!);
     return sets;
   };
-  for (const activity of moved.keys()) count(activity);
+  for (const activity of moved.activities) count(activity);
   for (const activity of byFinish) if (!moved.has(activity) && !count(activity)) break;
   return { finish, variance };
 }

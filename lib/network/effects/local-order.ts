@@ -58,7 +58,7 @@ export class LocalOrder {
     for (let activity = stack.pop(); activity !== undefined; activity = stack.pop()) {
       if (activity === link.from) return false;
       for (let k = successorStart[activity]!; k < successorStart[activity + 1]!; k++) {
-        if (working.removed[successorPosition[k]!] === 0) visit(successor[k]!);
+        if (!working.isRemoved(successorPosition[k]!)) visit(successor[k]!);
       }
       for (const other of working.added) if (other.from === activity) visit(other.to);
     }

