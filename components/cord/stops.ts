@@ -40,7 +40,7 @@ export function stopNote(stop: Stop, submission: SubmissionView, locale: string)
         ? 'blocked'
         : formatPercent(figures.corrected.chanceOfTarget, locale);
     case 'compare':
-      return revision === 0 ? 'first revision' : `Rev ${String(revision - 1)} → ${String(revision)}`;
+      return revision === 0 ? 'the first one' : `Rev ${String(revision - 1)} → ${String(revision)}`;
     case 'record':
       return plural(record, 'entry', 'entries', locale);
   }

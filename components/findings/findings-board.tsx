@@ -59,7 +59,7 @@ export function FindingsBoard({ office, view: submission, findings }: FindingsBo
       <section
         ref={list}
         aria-label="Findings"
-        className={classes('min-w-0', sheetOpen && 'max-xl:pb-[60dvh]')}
+        className={classes('min-w-0', sheetOpen && 'max-md:pb-[60dvh] md:max-xl:pr-96')}
       >
         <Toolbar
           findings={findings}

@@ -15,8 +15,8 @@ interface BenchFrameProps {
 }
 
 /**
- * Beside the grid where there is room; else a sheet drawn up from below, over the list and without locking
- * it: the keys go on working, and the list above can still be read.
+ * Beside the grid where there is room; else a sheet drawn in from the right, or up from below on a phone,
+ * without locking the list: the keys go on working, and what is left of it can still be read.
  */
 export function BenchFrame({ title, open, onClose, heading, children }: BenchFrameProps) {
   const id = useId();
@@ -29,7 +29,8 @@ export function BenchFrame({ title, open, onClose, heading, children }: BenchFra
       className={classes(
         'border border-t-2 border-hair border-t-ink bg-leaf p-4',
         'xl:sticky xl:top-4 xl:max-h-[calc(100dvh-32px)] xl:overflow-y-auto',
-        'max-xl:fixed max-xl:inset-x-0 max-xl:bottom-0 max-xl:z-30 max-xl:max-h-[72dvh] max-xl:overflow-y-auto max-xl:shadow-lift',
+        'max-xl:fixed max-xl:right-0 max-xl:bottom-0 max-xl:z-30 max-xl:overflow-y-auto max-xl:shadow-lift',
+        'max-md:left-0 max-md:max-h-[72dvh] md:max-xl:top-13 md:max-xl:w-100',
         !open && 'max-xl:hidden',
       )}
     >
