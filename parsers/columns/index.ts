@@ -1,5 +1,8 @@
 import type { Field, Matching, SheetMatching } from '@/lib/schedule/field';
 import type { Sheet } from '@/lib/schedule/sheet';
+import { isBlank } from '@/parsers/cells/text';
+import { UNREADABLE } from '@/parsers/errors';
+import { LIMITS } from '@/parsers/limits';
 import { type Detection, detectSheet, type SheetReading, toDetectedSheet } from './detection';
 import { checkColumns, type MatchingForm, namedSheets, withChosen } from './form';
 import { type MatchingError, UnmatchedColumns } from './unmatched';
@@ -109,9 +112,21 @@ function errorsOf(chosen: readonly SheetReading[], { columns, headerRow }: Match
       },
     ];
   }
+  if (isTooLong(chosen)) return [{ path: 'file', message: UNREADABLE['too-many-rows'] }];
   const problems = [...first.problems];
   if (first.rows === 0 && problems.length === 0) problems.push('Nothing stands below the header.');
   return problems.map((message) => ({ path: 'columns', message }));
+}
+
+/** Whether more rows that hold anything stand below the headers than a list may have. */
+function isTooLong(chosen: readonly SheetReading[]): boolean {
+  const count = chosen.reduce((sum, { sheet }) => sum + sheet.rows.length, 0);
+  if (count <= LIMITS.rows) return false;
+  const below = chosen.map(
+    ({ sheet, header }) =>
+      sheet.rows.filter(({ number, cells }) => number > header.row && !cells.every(isBlank)).length,
+  );
+  return below.reduce((sum, rows) => sum + rows, 0) > LIMITS.rows;
 }
 
 function isSure({ sheet, choices, header }: SheetReading, form: MatchingForm): boolean {

@@ -10,7 +10,7 @@ export function sheetOf(rows: readonly (readonly CellValue[])[], given: Partial<
     rows: rows.flatMap((cells, i) =>
       cells.length === 0 ? [] : [{ number: i + 1, hidden: false, outline: 0, cells }],
     ),
-    columnCount: Math.max(0, ...rows.map((cells) => cells.length)),
+    columnCount: rows.reduce((most, cells) => Math.max(most, cells.length), 0),
     hiddenColumns: new Set(),
     formulas: new Map(),
     formatCodes: ['General'],

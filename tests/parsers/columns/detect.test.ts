@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import type { Sheet } from '@/lib/schedule/sheet';
 import { detectMatching, matchingFrom, UnmatchedColumns } from '@/parsers/columns';
-import { drawn, merge } from '../../support/sheets';
+import { drawn, merge, sheetOf } from '../../support/sheets';
 
 /** `field=letter` for each column told, with the header row. */
 function told(...sheets: Sheet[]): string {
@@ -238,6 +238,13 @@ describe('what cannot be told', () => {
     ).toEqual([
       { sheet: 'Works', headerRow: 0, columns: { id: 0, optimistic: 1, likely: 2, pessimistic: 3 } },
     ]);
+  });
+
+  it('is refused where the list has more than 200 000 rows, the header not counted', () => {
+    const rows = (count: number) =>
+      sheetOf([['ID', 'Duration'], ...Array.from({ length: count }, (_, i) => [i + 1, 1])]);
+    expect(() => matchingFrom({}, [rows(200_000)])).not.toThrow();
+    expect(() => matchingFrom({}, [rows(200_001)])).toThrow(/more than 200 000 rows/);
   });
 
   it('costs no more than the sheet is wide and long', () => {
