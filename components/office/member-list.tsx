@@ -42,7 +42,7 @@ interface RowProps {
 function MemberRow({ member, onInvited, onLeaving }: RowProps) {
   const { me } = useOfficeView();
   return (
-    <li className="grid items-start gap-x-6 gap-y-1 border-b border-hair p-3 last:border-0 sm:grid-cols-[minmax(0,1fr)_minmax(0,1fr)_auto]">
+    <li className="grid items-start gap-x-6 gap-y-1 border-b border-hair p-3 last:border-0 sm:grid-cols-[minmax(0,1fr)_minmax(0,1fr)_13rem]">
       <div className="min-w-0">
         <span className="font-semibold">{member.name}</span>
         {member.email === me.email && <span className="text-slate"> (you)</span>}

@@ -49,7 +49,7 @@ export function CrumbTrail({ office }: { office: Crumb }) {
           return (
             <li
               key={`${String(index)} ${label}`}
-              className={`items-center ${near ? 'flex min-w-0' : 'hidden min-w-0 md:flex'} ${last ? 'max-w-full shrink-0' : ''}`}
+              className={`items-center ${near ? 'flex min-w-0' : 'hidden min-w-0 md:flex'} ${last ? 'max-w-[72%] shrink-0 md:max-w-full' : ''}`}
             >
               {index > 0 && (
                 <span
