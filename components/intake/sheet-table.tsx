@@ -151,6 +151,7 @@ function Role({ sheet, column, field, onField }: RoleProps) {
             {confidenceWord(detected.confidence)}
           </span>
           {detected.reason && `: ${detected.reason}`}
+          {detected.unit && ` In ${detected.unit}s, by its header.`}
         </p>
       )}
       {!asDetected && field !== null && <p className="px-1 pt-1 text-slate">set by hand</p>}

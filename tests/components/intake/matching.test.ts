@@ -17,6 +17,7 @@ const column = (index: number, field: string | null) => ({
   field,
   confidence: 1,
   reason: '',
+  unit: null,
 });
 const view: IntakeView = {
   sheets: [
