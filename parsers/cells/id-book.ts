@@ -11,6 +11,7 @@ export class IdBook {
   /** Other ways a number that is an ID may stand in a cell: 7 under the format 000 is 007. */
   private readonly aliases = new Map<string, string>();
   private readonly shapes = new Set<string>();
+  private readonly withoutBlanks = new Set<string>();
   private readonly inOrder: string[] = [];
   private readonly byName = new Map<string, string | null>();
   /** The most separators an ID has in it. */
@@ -26,6 +27,7 @@ export class IdBook {
       this.ids.set(id, this.inOrder.length);
       this.inOrder.push(id);
       this.shapes.add(shapeOf(id));
+      this.withoutBlanks.add(looseId(id));
       this.longest = Math.max(this.longest, id.length);
       if (/[,;&\s]/.test(id))
         this.separators = Math.max(this.separators, id.split(this.separator).length - 1);
@@ -52,6 +54,11 @@ export class IdBook {
     return this.shapes.has(shapeOf(clean(text)));
   }
 
+  /** Whether a text is an ID of the list but for blanks within it and case: `A 3` for A3. */
+  isNearlyId(text: string): boolean {
+    return this.withoutBlanks.has(looseId(text));
+  }
+
   /** IDs from one to another in the order of the list, both included; empty where they stand the other way. */
   between(first: string, last: string): string[] {
     const from = this.ids.get(first) ?? 0;
@@ -63,6 +70,10 @@ export class IdBook {
   named(name: string): string | null {
     return this.byName.get(clean(name).toLowerCase()) ?? null;
   }
+}
+
+function looseId(id: string): string {
+  return id.replace(/\s+/g, '').toLowerCase();
 }
 
 function shapeOf(id: string): string {

@@ -183,7 +183,8 @@ function readByBlanks(text: string, context: LinkContext): CellItem[] | null {
 /** An entry that begins with no ID of the list, and is built as one that does. */
 function readUnknown(text: string, context: LinkContext): LinkReading | null {
   const { ids } = context;
-  const looksLikeId = (id: string) => (id.length <= TOKEN_MAX && !/\s/.test(id)) || ids.hasShape(id);
+  const looksLikeId = (id: string) =>
+    (id.length <= TOKEN_MAX && !/\s/.test(id)) || ids.hasShape(id) || ids.isNearlyId(id);
   if (ids.hasShape(text)) return { id: text, type: 'FS', lag: 0, stated: false };
   const apart = UNKNOWN.exec(text);
   const close = apart ? null : UNKNOWN_JOINED.exec(text);

@@ -11,9 +11,6 @@ export interface Near {
   readonly how: Nearness;
 }
 
-/** One edit says nothing of a text shorter than this: every letter is one edit from every other. */
-const SHORTEST = 2;
-
 /** Without case, blanks and the kind of dash. */
 export const loose = (id: string) =>
   id
@@ -50,13 +47,15 @@ const editIndex = memo((list: ActivityList) => indexBy(list, (id) => lessOne(loo
 
 const idAt = (list: ActivityList, activity: number) => loose(list.activities[activity]?.id ?? '');
 
+/** Of one letter every other is one edit away, which says nothing. */
+const isNear = (wanted: string, id: string) => isOneEdit(wanted, id) && wanted.length + id.length > 2;
+
 function oneEditAway(list: ActivityList, wanted: string): number[] {
-  if (wanted.length < SHORTEST) return [];
   const found = new Set<number>();
   for (const key of lessOne(wanted)) {
     for (const activity of editIndex(list).get(key) ?? []) {
       const id = idAt(list, activity);
-      if (id.length >= SHORTEST && isOneEdit(wanted, id)) found.add(activity);
+      if (isNear(wanted, id)) found.add(activity);
     }
   }
   return likeliest(list, wanted, [...found]);

@@ -123,4 +123,13 @@ describe('a list that is read, audited, corrected and read again', () => {
     expect(contentAt(sheets, 'Works', 'E4')).toBe(10);
     expect(after.filter(({ weight }) => weight !== 'query')).toEqual([]);
   });
+
+  it('takes an ID with a blank in it for the one it is meant to be', () => {
+    const { before, sheets, after } = roundTrip([
+      drawn('ID|a|m|b|After\nA1|1|2|3|\nA2|1|2|4|A1\nA3|1|2|5|A 2 SS+1'),
+    ]);
+    expect(keysOf(before)).toContain('unknown-predecessor|A3|A 2');
+    expect(contentAt(sheets, 'Works', 'E4')).toBe('A2 SS+1');
+    expect(after.filter(({ weight }) => weight !== 'query')).toEqual([]);
+  });
 });

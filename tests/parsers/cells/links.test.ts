@@ -123,6 +123,12 @@ describe('an ID that is not in the list', () => {
     expect(read('see note', 'ACT 10', 'ACT 20')).toEqual(['?']);
   });
 
+  it('may be one of the list with a blank slipped in', () => {
+    expect(read('z 9', 'Z9', 'Z8')).toEqual(['z 9 FS 0']);
+    expect(read('Z 9 SS+1, Z8', 'Z9', 'Z8')).toEqual(['Z 9 SS 1', 'Z8 FS 0']);
+    expect(read('note 4', 'Z9', 'Z8')).toEqual(['?']);
+  });
+
   it('is told from a lead by how the IDs of the list are built', () => {
     expect(read('B-2', 'B', 'B-1', 'B-3')).toEqual(['B-2 FS 0']);
     expect(read('B-2', 'B', 'C')).toEqual(['B FS -2']);

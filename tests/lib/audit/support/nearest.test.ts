@@ -15,7 +15,8 @@ describe('nearestTo', () => {
     expect(near('pier-3', 'PIER-3', 'PIER-4')).toEqual({ how: 'letters', ids: ['PIER-3'] });
     expect(near('P-OO3', 'P-3', 'P-4')).toEqual({ how: 'lookalike', ids: ['P-3'] });
     expect(near('P-44', 'P-4', 'P-9')).toEqual({ how: 'edit', ids: ['P-4'] });
-    expect(near('Q', 'P-4', 'P-9')).toBeNull();
+    expect(near('3', 'A3', 'A4')).toEqual({ how: 'edit', ids: ['A3'] });
+    expect(near('Q', 'P', 'P-9')).toBeNull();
   });
 
   it('lists what is equally near in the order of the list', () => {
