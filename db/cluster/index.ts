@@ -38,27 +38,27 @@ export async function openCluster(options: ClusterOptions): Promise<Cluster> {
   await makeHome(home);
   const account = await clusterAccount();
   const unfinished = join(home, 'unfinished');
-  let folder = await clusterFolder(home, account, log);
-  // A first start that was broken off left something half made: begin again.
-  const begun = await access(unfinished).then(
-    () => true,
-    () => false,
-  );
-  const version = begun ? null : await dataVersion(join(folder, 'data'));
-  const programs = fittingPrograms(options.programs, version, join(folder, 'data'));
+  if (await exists(unfinished)) {
+    // A first start that was broken off left something half made: begin again.
+    await clearLeftover(join(home, 'postgres', 'data'), log);
+    await removeCluster(home);
+  }
+  const folder = await clusterFolder(home, account, log);
+  const data = join(folder, 'data');
+  const version = await dataVersion(data);
+  const programs = fittingPrograms(options.programs, version, data);
   const isNew = version === null;
-  await clearLeftover(join(folder, 'data'), log);
   if (isNew) {
     await writeFile(unfinished, '');
-    await removeCluster(home);
-    folder = await clusterFolder(home, account, log);
     await createCluster(programs, folder, account, passwords.owner, options.throwAway === true);
+  } else {
+    await clearLeftover(data, log);
   }
 
   const server = await startServer({
     programs,
     account,
-    data: join(folder, 'data'),
+    data,
     logFile: join(home, 'postgres.log'),
     password: passwords.owner,
     ...(options.throwAway ? { settings: HURRY } : {}),
@@ -98,3 +98,9 @@ async function withClient(url: string, work: (client: Client) => Promise<void>):
     await client.end();
   }
 }
+
+const exists = (file: string): Promise<boolean> =>
+  access(file).then(
+    () => true,
+    () => false,
+  );

@@ -1,5 +1,5 @@
 import { execFile } from 'node:child_process';
-import { readFile, readlink, rm } from 'node:fs/promises';
+import { readFile, readlink, realpath, rm } from 'node:fs/promises';
 import { join } from 'node:path';
 import { setTimeout as sleep } from 'node:timers/promises';
 import { promisify } from 'node:util';
@@ -12,7 +12,9 @@ const LONGEST_STOP = 60_000;
  * What a start that was killed left in the data folder: stops a server that still runs there, and removes
  * the lock file of one that does not. The caller holds the lock on the home, so no other start uses it.
  */
-export async function clearLeftover(data: string, log: (line: string) => void): Promise<void> {
+export async function clearLeftover(folder: string, log: (line: string) => void): Promise<void> {
+  const data = await realpath(folder).catch(() => null);
+  if (data === null) return;
   const file = join(data, 'postmaster.pid');
   const text = await readFile(file, 'utf8').catch(() => null);
   if (text === null) return;
