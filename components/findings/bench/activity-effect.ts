@@ -2,8 +2,11 @@ import type { CellEditView } from '@/lib/contract/submission';
 import type { RowEstimates, SheetColumnView, SheetRowsView } from '@/lib/contract/sheet-rows';
 import { parseAddress } from '@/lib/schedule/cell';
 
-/** Expected duration and variance of one activity, working days and working days². */
+/** The estimates of one activity as used, working days, with its expected duration and variance, working days². */
 export interface Moments {
+  readonly optimistic: number;
+  readonly likely: number;
+  readonly pessimistic: number;
   readonly expected: number;
   readonly variance: number;
 }
@@ -14,7 +17,13 @@ export function momentsOf(estimates: RowEstimates | null): Moments | null {
   const m = estimates.likely;
   const a = estimates.optimistic ?? m;
   const b = estimates.pessimistic ?? m;
-  return { expected: (a + 4 * m + b) / 6, variance: ((b - a) / 6) ** 2 };
+  return {
+    optimistic: a,
+    likely: m,
+    pessimistic: b,
+    expected: (a + 4 * m + b) / 6,
+    variance: ((b - a) / 6) ** 2,
+  };
 }
 
 /**

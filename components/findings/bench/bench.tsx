@@ -50,6 +50,7 @@ export function Bench({ office, submission, finding, ofRule, steps, onAdoptRule 
             <OpenFix
               finding={finding}
               bench={bench}
+              now={submission.figures.corrected}
               ofRule={ofRule}
               busy={steps.busy}
               closed={closed !== null}
@@ -61,6 +62,7 @@ export function Bench({ office, submission, finding, ofRule, steps, onAdoptRule 
               submission={submission.id}
               finding={finding}
               busy={steps.busy}
+              now={submission.figures.corrected}
               mayUndo={bench.may('corrections:undo')}
               lastBatch={steps.last}
               onUndo={() => void steps.undoFinding(finding)}

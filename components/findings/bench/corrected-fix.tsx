@@ -4,7 +4,7 @@ import { Button } from '@/components/ui/button';
 import { DateText } from '@/components/ui/date-text';
 import { useCorrections } from '@/lib/client/corrections';
 import { adoptedFix } from '@/lib/client/findings';
-import type { FindingView } from '@/lib/contract/submission';
+import type { Figures, FindingView } from '@/lib/contract/submission';
 import { correctionOf } from '../outcome';
 import { EffectLine } from './effect-line';
 import { EditsText } from './edits-text';
@@ -15,6 +15,8 @@ interface CorrectedFixProps {
   finding: FindingView;
   busy: boolean;
   mayUndo: boolean;
+  /** The figures as corrected. */
+  now: Figures;
   /** The batch that the key for undoing would take back. */
   lastBatch: string | null;
   onUndo: () => void;
@@ -22,7 +24,7 @@ interface CorrectedFixProps {
 
 /** What corrected a finding, who did it and when, with the way back. */
 export function CorrectedFix(props: CorrectedFixProps) {
-  const { office, submission, finding, busy, mayUndo, lastBatch, onUndo } = props;
+  const { office, submission, finding, busy, mayUndo, now, lastBatch, onUndo } = props;
   const corrections = useCorrections(office, submission, true);
   const fix = adoptedFix(finding);
   const correction = correctionOf(corrections.data ?? [], finding, fix);
@@ -42,7 +44,7 @@ export function CorrectedFix(props: CorrectedFixProps) {
       </p>
       {fix && <p>{fix.reason}</p>}
       <EditsText edits={edits} />
-      {fix && <EffectLine finding={finding} fix={fix} piece={undefined} />}
+      {fix && <EffectLine finding={finding} fix={fix} piece={undefined} now={now} />}
       {mayUndo && (correction || corrections.isPending) && (
         <Button
           variant="ghost"

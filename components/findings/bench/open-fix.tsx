@@ -1,6 +1,6 @@
 'use client';
 
-import type { FindingView } from '@/lib/contract/submission';
+import type { Figures, FindingView } from '@/lib/contract/submission';
 import { BenchActions } from './bench-actions';
 import { BY_HAND } from './fix-choice';
 import { FixOptions } from './fix-options';
@@ -10,6 +10,8 @@ import type { BenchState } from './use-bench';
 interface OpenFixProps {
   finding: FindingView;
   bench: BenchState;
+  /** The figures as corrected. */
+  now: Figures;
   ofRule: number;
   busy: boolean;
   /** Nothing can be corrected here any more. */
@@ -18,7 +20,7 @@ interface OpenFixProps {
 }
 
 /** What can be done about a finding that is not settled yet. */
-export function OpenFix({ finding, bench, ofRule, busy, closed, onAdoptRule }: OpenFixProps) {
+export function OpenFix({ finding, bench, now, ofRule, busy, closed, onAdoptRule }: OpenFixProps) {
   const { cells, piece, option, fix, hand } = bench;
   return (
     <>
@@ -31,6 +33,7 @@ export function OpenFix({ finding, bench, ofRule, busy, closed, onAdoptRule }: O
       <FixOptions
         finding={finding}
         piece={piece}
+        now={now}
         option={option}
         onOption={bench.choose}
         byHand={

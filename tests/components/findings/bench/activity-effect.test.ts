@@ -7,13 +7,20 @@ import { piece } from './piece';
 describe('the moments of three points', () => {
   it('follow the published formulas', () => {
     expect(momentsOf({ optimistic: 2, likely: 4, pessimistic: 12 })).toEqual({
+      optimistic: 2,
+      likely: 4,
+      pessimistic: 12,
       expected: 5,
       variance: (10 / 6) ** 2,
     });
   });
 
   it('take a missing outer estimate as the likely one, and need the likely one', () => {
-    expect(momentsOf({ optimistic: null, likely: 4, pessimistic: 10 })).toEqual({ expected: 5, variance: 1 });
+    expect(momentsOf({ optimistic: null, likely: 4, pessimistic: 10 })).toMatchObject({
+      optimistic: 4,
+      expected: 5,
+      variance: 1,
+    });
     expect(momentsOf({ optimistic: 2, likely: null, pessimistic: 10 })).toBeNull();
     expect(momentsOf(null)).toBeNull();
   });
