@@ -85,7 +85,7 @@ export class Unavailable extends Refusal {
 
 /** Reads what a caller sent by its shape; throws `Invalid` naming each field at fault. */
 export function checked<T extends z.ZodType>(shape: T, sent: unknown): z.output<T> {
-  const result = shape.safeParse(sent);
+  const result = shape.safeParse(sent, { error: plainly });
   if (result.success) return result.data;
   const errors = result.error.issues.map((issue) => ({ path: issue.path.join('.'), message: issue.message }));
   const [first] = errors;
@@ -93,3 +93,29 @@ export function checked<T extends z.ZodType>(shape: T, sent: unknown): z.output<
     errors.length === 1 && first ? first.message : `${errors.length} fields are not as they must be.`;
   throw new Invalid(sentence, { errors });
 }
+
+/** What is wrong with a value, where its shape has no sentence of its own. */
+function plainly(issue: z.core.$ZodRawIssue): string | undefined {
+  switch (issue.code) {
+    case 'invalid_type':
+      return issue.input === undefined
+        ? 'This is missing.'
+        : `This must be ${KINDS[issue.expected] ?? issue.expected}.`;
+    case 'invalid_value':
+      return `This must be one of ${issue.values.map(String).join(', ')}.`;
+    case 'invalid_format':
+      return issue.format === 'uuid' ? 'This is no id.' : undefined;
+    default:
+      return undefined;
+  }
+}
+
+const KINDS: Readonly<Record<string, string>> = {
+  string: 'a text',
+  number: 'a number',
+  int: 'a whole number',
+  boolean: 'true or false',
+  array: 'a list',
+  object: 'an object',
+  record: 'an object',
+};

@@ -193,7 +193,25 @@ describe('a project', () => {
     const answer = await create({ code: ' ', name: 'x', contractor: 'y', start: '2027-02-30' });
     expect(answer.status).toBe(422);
     const { errors } = await json<Problem>(answer);
-    expect(errors?.map((error) => error.path).sort()).toEqual(['code', 'contractor', 'start']);
+    expect(errors).toEqual([
+      { path: 'code', message: 'Give the project a code.' },
+      { path: 'contractor', message: 'Choose the contractor.' },
+      { path: 'start', message: 'Write a date as 2027-03-12.' },
+    ]);
+    const other = await json<Problem>(
+      await create({ ...good(), code: 5, unit: 'month', hoursPerDay: 'eight' }),
+    );
+    expect(other.errors).toEqual([
+      { path: 'code', message: 'This must be a text.' },
+      { path: 'unit', message: 'This must be one of day, hour, week.' },
+      { path: 'hoursPerDay', message: 'Give the hours as a number.' },
+    ]);
+    expect((await json<Problem>(await create({}))).errors?.map(({ path }) => path)).toEqual([
+      'code',
+      'name',
+      'contractor',
+      'start',
+    ]);
   });
 
   it.each([
