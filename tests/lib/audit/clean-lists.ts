@@ -91,3 +91,20 @@ export const SLIPS: Readonly<Record<string, Slip>> = {
   nameless: (rows, at) => ({ ...rowAt(rows, at), id: '_' }),
   unlinked: (rows, at) => ({ ...rowAt(rows, at), before: [] }),
 };
+
+/** A clean list with up to three slips put into it. */
+export const slippedList: fc.Arbitrary<readonly Row[]> = fc
+  .tuple(
+    cleanList,
+    fc.array(fc.tuple(fc.constantFrom(...Object.keys(SLIPS)), fc.nat(), fc.nat()), {
+      minLength: 1,
+      maxLength: 3,
+    }),
+  )
+  .map(([rows, slips]) =>
+    slips.reduce<readonly Row[]>((now, [kind, at, pick]) => {
+      const index = at % now.length;
+      const slip = SLIPS[kind];
+      return slip ? now.map((row, i) => (i === index ? slip(now, index, pick) : row)) : now;
+    }, rows),
+  );

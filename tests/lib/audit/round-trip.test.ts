@@ -1,3 +1,4 @@
+import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { type Finding, runAudit } from '@/lib/audit';
 import { composeAdoption, contentAt } from '@/lib/corrections';
@@ -5,6 +6,7 @@ import type { ReadingOptions } from '@/lib/schedule/activity-list';
 import type { Sheet } from '@/lib/schedule/sheet';
 import { detectMatching, readActivityList, readSheets } from '@/parsers';
 import { drawn } from '@/tests/support/sheets';
+import { slippedList } from './clean-lists';
 
 /** Reads and audits, adopts every proposed fix at once, and reads and audits what comes of it. */
 function roundTrip(received: readonly Sheet[], options?: ReadingOptions) {
@@ -131,5 +133,30 @@ describe('a list that is read, audited, corrected and read again', () => {
     expect(keysOf(before)).toContain('unknown-predecessor|A3|A 2');
     expect(contentAt(sheets, 'Works', 'E4')).toBe('A2 SS+1');
     expect(after.filter(({ weight }) => weight !== 'query')).toEqual([]);
+  });
+
+  it('ends without a defect that blocks, whatever was wrong with it', () => {
+    fc.assert(
+      fc.property(slippedList, (rows) => {
+        const lines = rows.map(({ id, name, numbers, before }) =>
+          [id === '_' ? '' : id, name, ...numbers, before.join('; ')].join('|'),
+        );
+        let sheets: readonly Sheet[] = [drawn([HEAD, ...lines].join('\n'))];
+        let findings: readonly Finding[] = [];
+        for (let round = 0; round < 6; round++) {
+          const { before, sheets: next, after } = roundTrip(sheets);
+          expect(
+            before.every(
+              ({ fix }) =>
+                fix?.edits.every(({ from, cell, sheet }) => contentAt(sheets, sheet, cell) === from) ?? true,
+            ),
+          ).toBe(true);
+          [sheets, findings] = [next, after];
+        }
+        expect(findings.filter(({ weight }) => weight === 'blocks')).toEqual([]);
+        expect(findings.filter(({ fix }) => fix)).toEqual([]);
+      }),
+      { numRuns: 60 },
+    );
   });
 });
