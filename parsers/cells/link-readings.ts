@@ -1,6 +1,6 @@
 import { RELATIONS } from '@/lib/schedule/relation';
 import type { LinkContext } from './links';
-import { readRelation } from './relation';
+import { readRelation, relationElsewhere } from './relation';
 
 const READINGS_MAX = 6;
 const WORDS_MAX = 6;
@@ -54,7 +54,8 @@ function relationTypo(text: string, context: LinkContext): string[] {
     ) ?? [];
   if (id === undefined || letters === undefined) return [];
   const bare = letters.replace(/[^\p{L}]/gu, '').toUpperCase();
-  const stated = RELATIONS.filter((relation) => relation === bare);
+  const elsewhere = relationElsewhere(bare);
+  const stated = RELATIONS.filter((relation) => relation === bare || relation === elsewhere);
   return (stated.length > 0 ? stated : RELATIONS.filter((relation) => differsByOne(bare, relation))).map(
     (relation) => `${id} ${relation}${lag}`,
   );

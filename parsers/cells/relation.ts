@@ -15,6 +15,31 @@ export interface LagContext {
 const MINUS = /^[-\u2212\u2013]$/;
 const LAG = /^([+\-\u2212\u2013])\s*(\d[\d.,]*|[.,]\d+)\s*(\p{L}[\p{L} .]*)?$/u;
 
+/**
+ * The letters by which lists in other languages name the relations (German, French, Spanish, Italian): common
+ * practice, from memory. Read where a column of its own gives the relation.
+ */
+const ELSEWHERE: Readonly<Record<string, Relation>> = {
+  EA: 'FS',
+  AA: 'SS',
+  EE: 'FF',
+  AE: 'SF',
+  FD: 'FS',
+  DD: 'SS',
+  DF: 'SF',
+  FC: 'FS',
+  CC: 'SS',
+  CF: 'SF',
+  FI: 'FS',
+  II: 'SS',
+  IF: 'SF',
+};
+
+/** The relation that two letters of another language name; null where they name none. */
+export function relationElsewhere(letters: string): Relation | null {
+  return ELSEWHERE[letters.toUpperCase()] ?? null;
+}
+
 /** Two letters that name a relation, in capitals; null where they name none. */
 export function toRelation(text: string): Relation | null {
   const letters = text.toUpperCase();
@@ -24,7 +49,8 @@ export function toRelation(text: string): Relation | null {
 /** A relation as a column of its own may give it: `SS`, `S-S`, `Start to start`, `start-start (SS)`. */
 export function readRelation(text: string): Relation | null {
   const words = fold(text);
-  const letters = toRelation(words.replace(/[\s./-]/g, ''));
+  const bare = words.replace(/[\s./-]/g, '');
+  const letters = toRelation(bare) ?? relationElsewhere(bare);
   if (letters) return letters;
   const [, named = words, bracketed = ''] = /^(.*?)\s*\(([a-z]{2})\)$/.exec(words) ?? [];
   const spelled = named.replace(/[\s-]+(?:to[\s-]+)?/g, ' to ');

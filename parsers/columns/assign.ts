@@ -29,6 +29,8 @@ const UNIQUE_FIELDS: readonly Field[] = [
 ];
 const OTHER_FIELDS = (Object.keys(FIELDS) as Field[]).filter((field) => !UNIQUE_FIELDS.includes(field));
 const SURE = 0.85;
+/** Beside three estimates, a column that is less surely the duration is the mean of them. */
+const USUAL = 0.8;
 const CLOSE = 0.12;
 const LEAST = 0.3;
 /** How much it says for an ID column that the predecessors name its cells. */
@@ -51,12 +53,15 @@ export function assign(headers: readonly HeaderReading[], contents: readonly Con
 
   for (const field of UNIQUE_FIELDS) {
     const found = field === 'id' ? withReferences(open('id'), choices, contents) : open(field);
-    const rival = field === 'duration' && choices.has('likely') ? null : rivalOf(found, headers, field);
+    const standsBeside = field === 'duration' && choices.has('likely');
+    if (standsBeside && (found[0]?.sureness ?? 0) < USUAL) continue;
+    const rival = standsBeside ? null : rivalOf(found, headers, field);
     if (rival && found[0]) problems.push(twice(field, found[0], rival, headers));
     take(field, found);
   }
   for (const field of OTHER_FIELDS) take(field, open(field));
-  wbsAsId(choices, contents);
+  if (!choices.has('id')) nameAsId(choices, contents);
+  if (!choices.has('id')) wbsAsId(choices, contents);
   problems.push(...missing(choices));
   return { choices, problems };
 }
@@ -97,11 +102,25 @@ function rivalOf(
   return null;
 }
 
+/** A list without an ID column may call activities by their names, if its links do. */
+function nameAsId(choices: Map<Field, Choice>, contents: readonly Content[]): void {
+  const name = choices.get('name');
+  const names = contents[name?.column ?? -1];
+  const links = contents[(choices.get('predecessors') ?? choices.get('successors'))?.column ?? -1];
+  if (!name || !names || !links || names.unique < 0.9 || (referenceShare(links, names) ?? 0) < 0.5) return;
+  choices.delete('name');
+  choices.set('id', {
+    column: name.column,
+    confidence: 0.7,
+    reason: 'No other column is an ID, and the links name its cells.',
+  });
+}
+
 /** A list without an ID column may give its work breakdown codes as IDs. */
 function wbsAsId(choices: Map<Field, Choice>, contents: readonly Content[]): void {
   const wbs = choices.get('wbs');
   const content = contents[wbs?.column ?? -1];
-  if (choices.has('id') || !wbs || !content || content.filled === 0 || content.unique < 0.9) return;
+  if (!wbs || !content || content.filled === 0 || content.unique < 0.9) return;
   choices.delete('wbs');
   choices.set('id', {
     column: wbs.column,

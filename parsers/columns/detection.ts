@@ -86,6 +86,8 @@ export function rowsBelow(sheet: Sheet, headerRow: number): number {
 
 /** The sheet as it is shown: every column that has a header, a field, or a cell in the first rows. */
 export function toDetectedSheet({ sheet, header, choices, rows }: SheetReading): DetectedSheet {
+  const reasonOf = (reason: string, index: number) =>
+    sheet.hiddenColumns.has(index) ? `${reason} The column is hidden in the sheet.` : reason;
   const fieldOf = new Map([...choices].map(([field, choice]) => [choice.column, { field, ...choice }]));
   const width = Math.min(sheet.columnCount, WIDTH_MAX);
   const columns = Array.from({ length: width }, (_, index): DetectedColumn => {
@@ -97,7 +99,7 @@ export function toDetectedSheet({ sheet, header, choices, rows }: SheetReading):
       header: reading?.text ?? '',
       field: told?.field ?? null,
       confidence: told?.confidence ?? 0,
-      reason: told?.reason ?? 'Nothing says what it holds; it is not used.',
+      reason: reasonOf(told?.reason ?? 'Nothing says what it holds; it is not used.', index),
       unit: unit && !other ? unit.unit : null,
     };
   });

@@ -118,7 +118,7 @@ function stripUnit(key: string): { key: string; unit: readonly WrittenUnit[] | n
       : { key: exact.has(key) ? key : rest, unit };
   }
   const [first = '', ...others] = words;
-  const unit = first.length > 2 && others.length > 0 ? readUnit(first) : null;
+  const unit = first.length > 2 && others.length > 0 && !NOT_TRAILING.has(first) ? readUnit(first) : null;
   return unit ? { key: others.join(' '), unit } : { key, unit: null };
 }
 

@@ -78,8 +78,9 @@ export const ENGLISH: readonly NameEntry[] = [
   [
     'duration',
     0.8,
-    'time|length|weeks|hours|period|estimate|time estimate|estimated time|expected duration|expected time|activity length|te|d|completion time|mean duration',
+    'time|length|weeks|hours|period|estimate|time estimate|estimated time|activity length|d|completion time',
   ],
+  ['duration', 0.6, 'expected|expected duration|expected time|expected value|te|mean|mean duration|average'],
   [
     'predecessors',
     1,

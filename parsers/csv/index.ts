@@ -1,4 +1,4 @@
-import type { Sheet, SheetRow } from '@/lib/schedule/sheet';
+import { type CellValue, ErrorValue, type Sheet, type SheetRow } from '@/lib/schedule/sheet';
 import { damaged, UnreadableFile } from '@/parsers/errors';
 import { LIMITS } from '@/parsers/limits';
 import { readDialect } from './dialect';
@@ -10,15 +10,19 @@ export { FieldCursor } from './fields';
 /** What a text file's only sheet is called. */
 export const CSV_SHEET = 'CSV';
 
+/** Error values, which a spreadsheet writes into text as it shows them. */
+const ERROR =
+  /^#(?:NULL!|DIV\/0!|VALUE!|REF!|NAME\?|NUM!|N\/A|SPILL!|CALC!|FIELD!|BLOCKED!|CONNECT!|BUSY!|UNKNOWN!|GETTING_DATA)$/;
+
 /**
- * Reads delimiter-separated text: every cell as text, rows numbered by record as a spreadsheet would show
+ * Reads delimiter-separated text: every cell as text but for error values, rows numbered by record as a spreadsheet would show
  * them. Throws UnreadableFile.
  */
 export function readCsv(bytes: Uint8Array): Sheet {
   const { text, dialect } = readDialect(bytes);
   const cursor = new FieldCursor(text, dialect.delimiter, dialect.preamble.length);
   const rows: SheetRow[] = [];
-  let cells: (string | null)[] = [];
+  let cells: CellValue[] = [];
   let filled = 0;
   let columnCount = 0;
   let used = 0;
@@ -26,7 +30,7 @@ export function readCsv(bytes: Uint8Array): Sheet {
     if (cells.length >= LIMITS.columns)
       throw damaged('A record of this file has more fields than a sheet has columns.');
     const value = cellText(cursor.value);
-    cells.push(value === '' ? null : value);
+    cells.push(value === '' ? null : ERROR.test(value) ? new ErrorValue(value) : value);
     if (value !== '') filled = cells.length;
     if (!cursor.last) continue;
     if (filled > 0) {

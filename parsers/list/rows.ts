@@ -36,12 +36,12 @@ export class RowSorter {
     let last = cells.matching.headerRow;
     this.current = null;
     this.sums = [0, 0, 0];
-    for (const row of rows) {
-      if (!cells.holdsAnything(row)) continue;
+    const held = rows.filter((row) => cells.holdsAnything(row));
+    for (const [i, row] of held.entries()) {
       this.blank += row.number - last - 1;
       last = row.number;
       if (repeats.test(row)) this.put(cells, row, null, 'note');
-      else this.sort(cells, row, read(row));
+      else this.sort(cells, row, read(row), held[i + 1]);
     }
     this.settleHeadings(first);
   }
@@ -59,13 +59,12 @@ export class RowSorter {
     return { read: this.rows.length + this.blank, blank: this.blank, ...counts };
   }
 
-  private sort(cells: SheetCells, row: SheetRow, facts: RowFacts): void {
+  private sort(cells: SheetCells, row: SheetRow, facts: RowFacts, next: SheetRow | undefined): void {
     const hasId = facts.id !== '' || facts.idError !== null;
     if (isLoneRemark(row) || this.isTotal(cells, facts)) this.put(cells, row, facts, 'note');
     else if (this.continues(facts)) this.put(cells, row, facts, 'continued');
     else if (facts.hasEstimates) {
-      const isHeading = !facts.hasLinks && (hasId || facts.name !== '') && isRolledUp(facts, cells);
-      if (isHeading) this.put(cells, row, facts, 'heading');
+      if (isSummary(cells, facts, next)) this.put(cells, row, facts, 'heading');
       else this.addActivity(cells, row, facts);
     } else if (facts.hasLinks) {
       if (hasId || facts.name !== '') this.addActivity(cells, row, facts);
@@ -184,6 +183,17 @@ export class RowSorter {
       else this.headings.push(toHeading(read, id, name));
     }
   }
+}
+
+/** A row without links that sums up those below it: by its formulas, or, where it has no ID, by its level. */
+function isSummary(cells: SheetCells, facts: RowFacts, next: SheetRow | undefined): boolean {
+  const { row, id, idError, name, hasLinks } = facts;
+  const hasId = id !== '' || idError !== null;
+  if (hasLinks || (!hasId && name === '')) return false;
+  if (isRolledUp(facts, cells)) return true;
+  if (hasId || !next) return false;
+  const wbs = cells.text(row, 'wbs');
+  return next.outline > row.outline || (wbs !== '' && cells.text(next, 'wbs').startsWith(`${wbs}.`));
 }
 
 function toHeading({ cells, row }: ReadRow, id: string, name: string): HeadingRow {

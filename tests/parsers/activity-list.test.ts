@@ -179,6 +179,17 @@ describe('every row is accounted for', () => {
     });
   });
 
+  it('a row without an ID that stands above its parts is a heading', () => {
+    const wbs = 'WBS|ID|Name|Duration|Preds\n1||Civil|20|\n1.1|A|Dig|10|\n1.2|B|Pour|10|A\n||Cure|2|B';
+    expect(kinds(read(wbs))).toEqual({ read: 4, activities: 3, headings: 1 });
+    const sheet = drawn('ID|Name|Duration|Preds\n|Civil|20|\nA|Dig|10|\nB|Pour|10|A');
+    const grouped = {
+      ...sheet,
+      rows: sheet.rows.map((row) => ({ ...row, outline: row.number > 2 ? 1 : 0 })),
+    };
+    expect(kinds(read(grouped))).toEqual({ read: 3, activities: 2, headings: 1 });
+  });
+
   it('an activity that is repeated for each of its links goes on, and a second one of the same ID does not', () => {
     const list = read(
       'ID|Name|Duration|Predecessor|Type|Lag\nA|Dig|2||\nB|Pour|3|A|SS|1\nB|Pour|3|Z|FF|\nB|Pour|3|Z|FF|\nC|Cure|3|B||',

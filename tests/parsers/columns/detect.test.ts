@@ -79,6 +79,24 @@ describe('the header row and the columns', () => {
     );
   });
 
+  it('take names for IDs where there are no others and the predecessors name them', () => {
+    const text =
+      'Activity name|Duration|Predecessors\nDig the pit|2|\nPour the slab|3|Dig the pit\nCure the slab|1|Pour the slab';
+    expect(told(drawn(text))).toBe('1: id=A duration=B predecessors=C');
+    expect(told(drawn('Activity name|Duration\nDig the pit|2\nPour the slab|3\nCure the slab|1'))).toMatch(
+      /name=A duration=B !$/,
+    );
+  });
+
+  it('take an expected time for the likely one only beside a best and a worst', () => {
+    expect(told(drawn('ID|Best|Expected|Worst|After\nA|1|2|3|\nB|1|2|3|A\nC|1|2|3|B'))).toBe(
+      '1: id=A optimistic=B duration=C pessimistic=D predecessors=E',
+    );
+    expect(told(drawn('ID|Expected time|After\nA|1|\nB|1|A\nC|1|B'))).toBe(
+      '1: id=A duration=B predecessors=C',
+    );
+  });
+
   it('take WBS codes for IDs where there are no others', () => {
     expect(
       told(drawn('WBS|Name|Duration|Predecessors\n1.1|Dig it|2|\n1.2|Pour it|3|1.1\n1.3|Cure it|3|1.2')),

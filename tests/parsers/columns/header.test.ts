@@ -54,6 +54,7 @@ describe('names of columns', () => {
         'Opt.',
         'Opt. Dur. [h]',
         'Low',
+        'Min Dur',
         'Duration (min)',
         'Duration \u2013 optimistic',
         'Duration (optimistic) [days]',

@@ -1,6 +1,7 @@
 import fc from 'fast-check';
 import Papa from 'papaparse';
 import { describe, expect, it } from 'vitest';
+import { ErrorValue } from '@/lib/schedule/sheet';
 import { UnreadableFile } from '@/parsers/errors';
 import { FieldCursor, readCsv, readDialect } from '@/parsers/csv';
 import { readSheets } from '@/parsers/read-sheets';
@@ -53,6 +54,18 @@ describe('records and fields', () => {
 
   it('takes ="007" as the text it protects', () => {
     expect(read('="007",b\n')).toEqual([[1, '007', 'b']]);
+  });
+
+  it('tells error values from texts', () => {
+    const [row] = readCsv(bytesOf('#REF!,#N/A,#DIV/0!,# 4,#N/A!\n')).rows;
+    expect(row?.cells.map((value) => (value instanceof ErrorValue ? value.code : value))).toEqual([
+      '#REF!',
+      '#N/A',
+      '#DIV/0!',
+      '# 4',
+      '#N/A!',
+    ]);
+    expect(row?.cells.filter((value) => value instanceof ErrorValue)).toHaveLength(3);
   });
 
   it('refuses a quotation mark that never closes', () => {
