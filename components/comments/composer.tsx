@@ -23,13 +23,14 @@ export function Composer({ office, submission, finding, field }: ComposerProps) 
   const { me } = useOfficeView();
   const audiences = audiencesFor(me.role);
   const [audience, setAudience] = useState<Audience>(audiences[0] ?? 'shared');
-  const [body, setBody] = useDraft(`${submission}/${finding}`);
+  const draft = useDraft(`${submission}/${finding}`);
   const add = useAddComment(office, submission);
   const label = useId();
 
   const send = () => {
-    if (add.isPending || body.trim() === '') return;
-    add.mutate({ body: body.trim(), finding, audience }, { onSuccess: () => setBody('') });
+    const { text } = draft;
+    if (add.isPending || text.trim() === '') return;
+    add.mutate({ body: text.trim(), finding, audience }, { onSuccess: () => draft.sent(text) });
   };
   const onKey = (event: KeyboardEvent<HTMLTextAreaElement>) => {
     if (event.key === 'Escape') event.currentTarget.blur();
@@ -49,9 +50,9 @@ export function Composer({ office, submission, finding, field }: ComposerProps) 
       <Textarea
         id={`${label}-text`}
         ref={field}
-        value={body}
+        value={draft.text}
         maxLength={5000}
-        onChange={(event) => setBody(event.target.value)}
+        onChange={(event) => draft.write(event.target.value)}
         onKeyDown={onKey}
         aria-keyshortcuts="c"
       />
