@@ -21,7 +21,7 @@ export function ChooseStage({ stage, again, onFile, onRefused }: Props) {
             {file ? `“${file.name}” was not taken in` : 'Nothing was taken in'}
           </p>
           <p className="max-w-prose">{trouble.sentence}</p>
-          <p className="text-slate">Nothing of it was kept, and the project is as it was.</p>
+          <p className="text-slate">The project is as it was.</p>
           {file && (
             <Button variant="ghost" className="mt-3" onClick={() => onFile(file)}>
               Try this file again

@@ -6,7 +6,7 @@ import { Button } from '@/components/ui/button';
 import { classes } from '@/components/ui/classes';
 import { formatBytes } from '@/lib/client/format';
 
-export const LARGEST_BYTES = 20_000_000;
+const LARGEST_BYTES = 20 * 1024 * 1024;
 
 interface Props {
   onFile: (file: File) => void;

@@ -115,7 +115,7 @@ export function confidenceWord(confidence: number): 'sure' | 'likely' | 'a guess
   return confidence >= 0.6 ? 'likely' : 'a guess';
 }
 
-export function listed(parts: readonly string[]): string {
+function listed(parts: readonly string[]): string {
   if (parts.length < 2) return parts[0] ?? '';
   return `${parts.slice(0, -1).join(', ')} and ${parts.at(-1) ?? ''}`;
 }

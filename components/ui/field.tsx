@@ -3,7 +3,7 @@
 import { useId, type ComponentProps, type ReactNode } from 'react';
 import { classes } from './classes';
 
-export interface FieldAria {
+interface FieldAria {
   id: string;
   'aria-describedby': string | undefined;
   'aria-invalid': true | undefined;

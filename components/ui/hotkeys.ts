@@ -75,7 +75,7 @@ function hotkeysOn(): boolean {
 }
 
 /** Not while typing, choosing or in a dialog; not with a modifier, which belongs to the browser. */
-export function mayAct(event: KeyboardEvent): boolean {
+function mayAct(event: KeyboardEvent): boolean {
   if (
     event.isComposing ||
     event.defaultPrevented ||

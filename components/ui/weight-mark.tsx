@@ -17,7 +17,7 @@ export function WeightMark({ weight, bare = false }: { weight: Weight; bare?: bo
 }
 
 /** The shape alone, in the current colour; always beside its word. */
-export function WeightSquare({ weight }: { weight: Weight }) {
+function WeightSquare({ weight }: { weight: Weight }) {
   return (
     <svg viewBox="0 0 10 10" width="10" height="10" aria-hidden="true" className="relative top-px shrink-0">
       <rect x="0.75" y="0.75" width="8.5" height="8.5" fill="none" stroke="currentColor" strokeWidth="1.5" />
