@@ -1,4 +1,3 @@
-export { makeContext } from './context';
 export { ruleById, RULES } from './registry';
 export { renderMessage } from './render';
 export type {

@@ -41,14 +41,14 @@ export const cleanList: fc.Arbitrary<Row[]> = fc
   });
 
 /** One defect put into a row; `pick` chooses among what there is. */
-export type Slip = (rows: readonly Row[], at: number, pick: number) => Row;
+type Slip = (rows: readonly Row[], at: number, pick: number) => Row;
 
 const rowAt = (rows: readonly Row[], at: number): Row =>
   rows[at] ?? { id: '', name: '', numbers: ['1', '2', '3'], before: [] };
 const other = (rows: readonly Row[], pick: number) => rowAt(rows, pick % rows.length).id;
 
 /** Slips of every kind that has a fix. */
-export const SLIPS: Readonly<Record<string, Slip>> = {
+const SLIPS: Readonly<Record<string, Slip>> = {
   exchanged: (rows, at) => {
     const row = rowAt(rows, at);
     return { ...row, numbers: [row.numbers[1], row.numbers[0], row.numbers[2]] };
