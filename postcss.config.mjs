@@ -1,4 +1,3 @@
-/** @type {import('postcss-load-config').Config} */
 const config = { plugins: { '@tailwindcss/postcss': {} } };
 
 export default config;

@@ -1,5 +1,6 @@
 'use client';
 
+import { usePathname } from 'next/navigation';
 import type { ReactNode } from 'react';
 import { ClientError, sentenceOf } from '@/lib/client/error';
 import { Button } from './button';
@@ -23,27 +24,30 @@ export function EmptyState({ title, children, action }: Shown) {
   );
 }
 
-/** What happened, what was kept, what to do next. */
-export function ErrorState({
-  error,
-  title,
-  retry,
-  children,
-}: {
+interface ErrorProps {
   error: unknown;
   title?: string;
   retry?: () => void;
   children?: ReactNode;
-}) {
-  const refused = error instanceof ClientError && (error.status === 403 || error.status === 404);
+}
+
+/** What happened, what was kept, what to do next. */
+export function ErrorState({ error, title, retry, children }: ErrorProps) {
+  const pathname = usePathname();
+  const status = error instanceof ClientError ? error.status : 0;
+  const refused = status === 403 || status === 404;
   return (
     <div role="alert" className="border border-l-4 border-hair border-l-umber bg-leaf p-4">
-      <p className="text-base font-semibold">
-        {title ?? (refused ? 'This is not open to you' : 'This could not be shown')}
-      </p>
+      <p className="text-base font-semibold">{title ?? TITLES[status] ?? 'This could not be shown'}</p>
       <p className="max-w-prose">{sentenceOf(error)}</p>
       {children}
-      {retry && !refused && (
+      {status === 401 && (
+        <p className="mt-3">
+          {/* A full navigation: nothing of the ended session stays in memory. */}
+          <a href={`/sign-in?next=${encodeURIComponent(pathname)}`}>Sign in again</a>
+        </p>
+      )}
+      {retry && !refused && status !== 401 && (
         <Button variant="ghost" className="mt-3" onClick={retry}>
           Try again
         </Button>
@@ -51,6 +55,12 @@ export function ErrorState({
     </div>
   );
 }
+
+const TITLES: Partial<Record<number, string>> = {
+  401: 'Your session has ended',
+  403: 'This is not open to you',
+  404: 'This is not open to you',
+};
 
 /** Rows that are still to come, with a word for those who do not see them. */
 export function Loading({ label, rows = 3 }: { label: string; rows?: number }) {

@@ -46,6 +46,8 @@ export function unreachable(): ClientError {
 
 /** A plain sentence for whatever was thrown. */
 export function sentenceOf(error: unknown): string {
+  // The server's sentence for this is for programs, which have no sign-in page.
+  if (error instanceof ClientError && error.status === 401) return titleOf(401);
   if (error instanceof ClientError) return error.message;
   return 'Something went wrong on this page. Reload it and try again.';
 }

@@ -44,6 +44,11 @@ describe('toClientError', () => {
 });
 
 describe('sentenceOf', () => {
+  it('speaks to people about an ended session, not to programs', () => {
+    const error = toClientError(401, JSON.stringify({ title: 'Not signed in', detail: 'Send a token.' }));
+    expect(sentenceOf(error)).toMatch(/signed out/);
+  });
+
   it('shows the server’s sentence, and never the inside of a program error', () => {
     expect(sentenceOf(unreachable())).toMatch(/could not be reached/);
     expect(sentenceOf(new TypeError('x is undefined'))).not.toMatch(/undefined/);
