@@ -33,6 +33,11 @@ export class LocalOrder {
     return true;
   }
 
+  /** The last rank that mending has reached; −1 where nothing is mended. */
+  get mendedTo(): number {
+    return this.moved.reduce((last, { from, order }) => Math.max(last, from + order.length - 1), -1);
+  }
+
   undo(): void {
     for (let step = this.moved.pop(); step; step = this.moved.pop()) this.place(step.from, step.order);
   }
@@ -46,7 +51,6 @@ export class LocalOrder {
 
   /** Marks what follows the link's end up to a rank; false where the link's beginning is among it. */
   private mark(link: AddedLink, last: number, working: WorkingNetwork): boolean {
-    const { successorStart, successor, successorPosition } = working.network;
     this.round++;
     const stack = [link.to];
     const visit = (activity: number) => {
@@ -57,10 +61,7 @@ export class LocalOrder {
     this.seen[link.to] = this.round;
     for (let activity = stack.pop(); activity !== undefined; activity = stack.pop()) {
       if (activity === link.from) return false;
-      for (let k = successorStart[activity]!; k < successorStart[activity + 1]!; k++) {
-        if (!working.isRemoved(successorPosition[k]!)) visit(successor[k]!);
-      }
-      for (const other of working.added) if (other.from === activity) visit(other.to);
+      working.forEachLinkOutOf(activity, visit);
     }
     return true;
   }

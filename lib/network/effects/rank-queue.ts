@@ -17,6 +17,10 @@ export class RankQueue {
     if (this.size === 1 || word < this.word) this.word = word;
   }
 
+  clear(): void {
+    while (this.take() !== -1);
+  }
+
   /** The lowest rank, taken out; −1 where there is none. */
   take(): number {
     if (this.size === 0) return -1;

@@ -125,6 +125,17 @@ export class WorkingNetwork {
     return changed;
   }
 
+  /** Calls back with each link out of an activity that is not removed: where it leads, and its weight. */
+  forEachLinkOutOf(activity: number, visit: (to: number, weight: number) => void): void {
+    const { successorStart, successor, successorPosition } = this.network;
+    for (let k = successorStart[activity]!; k < successorStart[activity + 1]!; k++) {
+      // A removed link may run against the mended order.
+      const weight = this.weight[successorPosition[k]!]!;
+      if (weight !== NOTHING) visit(successor[k]!, weight);
+    }
+    for (const link of this.added) if (link.from === activity) visit(link.to, this.weightOf(link));
+  }
+
   private weigh(position: number): number {
     const { predecessor, relation } = this.network;
     const from = this.duration[predecessor[position]!]!;
@@ -136,8 +147,12 @@ export class WorkingNetwork {
     if (position !== -1 && !this.isRemoved(position)) this.set(this.weight, position, this.weigh(position));
   }
 
-  private boundOf({ from, to, relation, lag }: AddedLink): number {
-    return this.earlyStart[from]! + startToStart(relation, lag, this.duration[from]!, this.duration[to]!);
+  private boundOf(link: AddedLink): number {
+    return this.earlyStart[link.from]! + this.weightOf(link);
+  }
+
+  private weightOf({ from, to, relation, lag }: AddedLink): number {
+    return startToStart(relation, lag, this.duration[from]!, this.duration[to]!);
   }
 
   private estimate(change: Extract<NetworkChange, { kind: 'estimates' }>): void {

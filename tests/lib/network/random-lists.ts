@@ -8,6 +8,8 @@ interface Shape {
   readonly size: number;
   /** Links at most. */
   readonly links: number;
+  /** How far apart the ends of a link are at most, in the order in which they are drawn. */
+  readonly near?: number;
   /** Whether links may run in a ring. */
   readonly loops?: boolean;
   /** Multiples of this many days (1: whole days, so that ties are common). */
@@ -18,7 +20,13 @@ interface Shape {
  * Random lists in the short notation: any relation, lags and leads, several links of a pair, activities in an
  * order that has nothing to do with the links.
  */
-export function randomLists({ size, links, loops = false, step = 1 }: Shape): fc.Arbitrary<ActivityList> {
+export function randomLists({
+  size,
+  links,
+  near = Infinity,
+  loops = false,
+  step = 1,
+}: Shape): fc.Arbitrary<ActivityList> {
   const days = (most: number) => fc.integer({ min: 0, max: most / step }).map((n) => n * step);
   const estimates = fc.tuple(days(8), days(8), days(8)).map((three) => three.sort((x, y) => x - y));
   return fc.integer({ min: 1, max: size }).chain((count) =>
@@ -41,6 +49,7 @@ export function randomLists({ size, links, loops = false, step = 1 }: Shape): fc
       })
       .map((drawn) => {
         const kept = drawn.links
+          .map((link) => ({ ...link, to: link.from + ((link.to - link.from) % near) }))
           .filter(({ from, to }) => from !== to)
           .map((link) => (loops || link.from < link.to ? link : { ...link, from: link.to, to: link.from }));
         const rows = drawn.estimates.map(([a, m, b], drawnAs) => {

@@ -65,6 +65,32 @@ describe('the finish effect of a fix', () => {
   });
 });
 
+describe('a wide schedule of equal ways', () => {
+  const across = Array.from({ length: 100 }, (_, k) => k);
+  const layer = (k: number) =>
+    across.map((i) => `${'PQRSTUVWXY'[k]}${i} 5 <- ${k === 0 ? 'A' : `${'PQRSTUVWXY'[k - 1]}${i}`}`);
+  const layers = Array.from({ length: 10 }, (_, k) => layer(k)).flat();
+  const last = across.map((i) => `Y${i}`).join(', ');
+  const effects = effectsOf(list('A 5', ...layers, `Z 1 4 7 <- ${last}`));
+
+  it('moves as a whole, or not at all for one of its ways', () => {
+    const estimates = (activity: number, days: number): NetworkChange => ({
+      ...{ kind: 'estimates', activity },
+      ...{ optimistic: days, likely: days, pessimistic: days },
+    });
+    const duration = (...changes: NetworkChange[]) => effects.effect(changes)?.expectedDuration;
+    expect(duration(estimates(0, 2))).toBe(-3);
+    expect(duration(estimates(0, 7.5))).toBe(2.5);
+    expect(duration(estimates(1, 2))).toBe(0);
+    expect(duration(estimates(1, 9))).toBe(4);
+    expect(duration(...across.map((i) => estimates(1 + i, 4)))).toBe(-1);
+    expect(duration(...across.slice(1).map((i) => estimates(1 + i, 4)))).toBe(0);
+    expect(
+      effects.effect([{ kind: 'estimates', activity: 1, optimistic: 2, likely: 5, pessimistic: 8 }]),
+    ).toEqual({ expectedDuration: 0, variance: 1 });
+  });
+});
+
 describe('any finish effect', () => {
   const days = fc.integer({ min: 0, max: 16 }).map((n) => n / 2);
   const lag = fc.integer({ min: -8, max: 8 }).map((n) => n / 2);
@@ -115,6 +141,8 @@ describe('any finish effect', () => {
     ['of few activities', randomLists({ size: 8, links: 16 })],
     ['of many', randomLists({ size: 80, links: 240, step: 0.5 })],
     ['of many with few links', randomLists({ size: 120, links: 100 })],
+    ['of many in a row', randomLists({ size: 150, links: 600, near: 5, step: 0.5 })],
+    ['of many in a row with ties', randomLists({ size: 150, links: 400, near: 3, step: 4 })],
   ])('is that of computing the list afresh, %s', (_, lists) => {
     const cases = lists.chain((activities) => {
       const one = change(activities.activities.length, activities.links.length);
@@ -139,7 +167,7 @@ describe('any finish effect', () => {
           }
         }
       }),
-      { numRuns: 400 },
+      { numRuns: 200 },
     );
   });
 });
