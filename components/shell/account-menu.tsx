@@ -36,53 +36,51 @@ export function AccountMenu({ onKeys }: { onKeys: () => void }) {
       >
         {initials(office.me.name)}
       </DropdownMenu.Trigger>
-      <DropdownMenu.Portal>
-        <DropdownMenu.Content
-          align="end"
-          sideOffset={6}
-          collisionPadding={8}
-          className="z-40 w-64 border border-t-2 border-hair border-t-ink bg-leaf py-1 text-sm text-ink shadow-lift"
-        >
-          <DropdownMenu.Label className="border-b border-hair px-3 pt-1 pb-2">
-            <span className="block font-semibold">{office.me.name}</span>
-            <span className="block break-all text-slate">{office.me.email}</span>
-            <span className="block text-slate">
-              {office.me.role} · {office.name}
-            </span>
-          </DropdownMenu.Label>
-          {others.length > 0 && <DropdownMenu.Label className={LABEL}>Other offices</DropdownMenu.Label>}
-          {others.map(({ slug, name }) => (
-            <DropdownMenu.Item key={slug} className={ITEM} onSelect={() => router.push(`/${slug}`)}>
-              {name}
-            </DropdownMenu.Item>
+      <DropdownMenu.Content
+        align="end"
+        sideOffset={6}
+        collisionPadding={8}
+        className="z-40 w-64 border border-t-2 border-hair border-t-ink bg-leaf py-1 text-sm text-ink shadow-lift"
+      >
+        <DropdownMenu.Label className="border-b border-hair px-3 pt-1 pb-2">
+          <span className="block font-semibold">{office.me.name}</span>
+          <span className="block break-all text-slate">{office.me.email}</span>
+          <span className="block text-slate">
+            {office.me.role} · {office.name}
+          </span>
+        </DropdownMenu.Label>
+        {others.length > 0 && <DropdownMenu.Label className={LABEL}>Other offices</DropdownMenu.Label>}
+        {others.map(({ slug, name }) => (
+          <DropdownMenu.Item key={slug} className={ITEM} onSelect={() => router.push(`/${slug}`)}>
+            {name}
+          </DropdownMenu.Item>
+        ))}
+        <DropdownMenu.Label className={LABEL}>Light or dark</DropdownMenu.Label>
+        <DropdownMenu.RadioGroup value={theme} onValueChange={choose}>
+          {Object.entries(THEMES).map(([value, label]) => (
+            <DropdownMenu.RadioItem
+              key={value}
+              value={value}
+              className={ITEM}
+              onSelect={(e) => e.preventDefault()}
+            >
+              <span className="grid size-4 place-items-center">
+                <DropdownMenu.ItemIndicator>
+                  <Check aria-hidden="true" size={16} />
+                </DropdownMenu.ItemIndicator>
+              </span>
+              {label}
+            </DropdownMenu.RadioItem>
           ))}
-          <DropdownMenu.Label className={LABEL}>Light or dark</DropdownMenu.Label>
-          <DropdownMenu.RadioGroup value={theme} onValueChange={choose}>
-            {Object.entries(THEMES).map(([value, label]) => (
-              <DropdownMenu.RadioItem
-                key={value}
-                value={value}
-                className={ITEM}
-                onSelect={(e) => e.preventDefault()}
-              >
-                <span className="grid size-4 place-items-center">
-                  <DropdownMenu.ItemIndicator>
-                    <Check aria-hidden="true" size={16} />
-                  </DropdownMenu.ItemIndicator>
-                </span>
-                {label}
-              </DropdownMenu.RadioItem>
-            ))}
-          </DropdownMenu.RadioGroup>
-          <DropdownMenu.Separator className="my-1 h-px bg-hair" />
-          <DropdownMenu.Item className={ITEM} onSelect={onKeys}>
-            Keys on this page
-          </DropdownMenu.Item>
-          <DropdownMenu.Item className={ITEM} onSelect={() => void signOut({ callbackUrl: '/sign-in' })}>
-            Sign out
-          </DropdownMenu.Item>
-        </DropdownMenu.Content>
-      </DropdownMenu.Portal>
+        </DropdownMenu.RadioGroup>
+        <DropdownMenu.Separator className="my-1 h-px bg-hair" />
+        <DropdownMenu.Item className={ITEM} onSelect={onKeys}>
+          Keys on this page
+        </DropdownMenu.Item>
+        <DropdownMenu.Item className={ITEM} onSelect={() => void signOut({ callbackUrl: '/sign-in' })}>
+          Sign out
+        </DropdownMenu.Item>
+      </DropdownMenu.Content>
     </DropdownMenu.Root>
   );
 }
