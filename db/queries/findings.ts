@@ -1,4 +1,4 @@
-import { and, asc, eq, inArray, ne, sql } from 'drizzle-orm';
+import { and, asc, eq, inArray, sql } from 'drizzle-orm';
 import type { MessageData } from '@/lib/audit/rule';
 import type { FindingState, Weight } from '@/lib/schedule/weight';
 import type { Tx } from '../client';
@@ -75,21 +75,6 @@ export async function findFinding(tx: Tx, submissionId: string, id: string) {
     .from(findings)
     .where(and(eq(findings.submissionId, submissionId), eq(findings.id, id)));
   return row ?? null;
-}
-
-/** Ids of the findings that keep a state of the schedule from being computed. */
-export async function listBlocking(
-  tx: Tx,
-  submissionId: string,
-  state: 'received' | 'corrected',
-): Promise<string[]> {
-  const ofState = state === 'received' ? eq(findings.origin, 'received') : ne(findings.state, 'corrected');
-  const rows = await tx
-    .select({ id: findings.id })
-    .from(findings)
-    .where(and(eq(findings.submissionId, submissionId), eq(findings.weight, 'blocks'), ofState))
-    .orderBy(asc(findings.position), asc(findings.id));
-  return rows.map((row) => row.id);
 }
 
 export interface FindingChange {

@@ -78,7 +78,12 @@ export async function lockProject(tx: Tx, projectId: string): Promise<void> {
 
 export async function findLatest(tx: Tx, projectId: string) {
   const [row] = await tx
-    .select({ id: submissions.id, revision: submissions.revision, fileSha256: submissions.fileSha256 })
+    .select({
+      id: submissions.id,
+      revision: submissions.revision,
+      fileSha256: submissions.fileSha256,
+      receivedAt: submissions.receivedAt,
+    })
     .from(submissions)
     .where(eq(submissions.projectId, projectId))
     .orderBy(desc(submissions.revision))
@@ -86,7 +91,7 @@ export async function findLatest(tx: Tx, projectId: string) {
   return row ?? null;
 }
 
-type NewSubmission = Omit<typeof submissions.$inferInsert, 'status' | 'version' | 'receivedAt'> & {
+type NewSubmission = Omit<typeof submissions.$inferInsert, 'status' | 'version'> & {
   id: string;
 };
 

@@ -21,7 +21,8 @@ export function uploadForm(file: File, choice: MatchingChoice = {}): FormData {
   for (const sheet of choice.sheets ?? []) form.append('sheet', sheet);
   if (choice.columns) form.append('columns', JSON.stringify(choice.columns));
   if (choice.headerRow !== undefined) form.append('headerRow', String(choice.headerRow));
-  if (choice.again) form.append('again', 'true');
+  // The page asks before it takes in the same file twice.
+  form.append('again', String(choice.again ?? false));
   form.append('file', file, file.name);
   return form;
 }

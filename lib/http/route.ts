@@ -17,6 +17,7 @@ export interface Call {
   readonly form: Form;
   /** Where the asker finds this service: scheme, host and port. */
   readonly origin: string;
+  readonly arrived: Date;
 }
 
 interface Options {
@@ -55,11 +56,12 @@ function handler<Who>(
   identify: (headers: Headers, path: Call['path']) => Promise<Who>,
 ): Handler {
   return async (request, { params }) => {
+    const arrived = new Date();
     try {
       const path = await params;
       const who = await identify(request.headers, path);
       if (bearerToken(request.headers) === null) requireSameOrigin(request);
-      const call = await read(request, path, options);
+      const call = await read(request, path, arrived, options);
       return respond(await useCase(who, call as never), options, request);
     } catch (error) {
       return problemResponse(error, request);
@@ -67,7 +69,12 @@ function handler<Who>(
   };
 }
 
-async function read(request: Request, path: Call['path'], { takes = 'json' }: Options): Promise<Call> {
+async function read(
+  request: Request,
+  path: Call['path'],
+  arrived: Date,
+  { takes = 'json' }: Options,
+): Promise<Call> {
   // A parameter without a value is one that was not given: a form's empty field.
   const given = [...new URL(request.url).searchParams].filter(([, value]) => value !== '');
   const query = Object.fromEntries(given);
@@ -78,6 +85,7 @@ async function read(request: Request, path: Call['path'], { takes = 'json' }: Op
     body: sends && takes === 'json' ? await readJson(request) : null,
     form: sends && takes === 'form' ? await readForm(request) : NO_FORM,
     origin: originOf(request),
+    arrived,
   };
 }
 

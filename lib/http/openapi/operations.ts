@@ -22,7 +22,9 @@ const submissionForm = uploadForm.extend({
   again: z
     .string()
     .optional()
-    .describe('`true` takes in a file although it is byte for byte the latest revision.'),
+    .describe(
+      'For a file that is byte for byte the latest revision: `true` takes it in, `false` refuses it; else it is taken in unless that revision came while this one was on its way.',
+    ),
 });
 
 const atLarge: readonly Operation[] = [

@@ -1,11 +1,10 @@
 import type { z } from 'zod';
-import { listBlocking, listFindingIds } from '@/db/queries/findings';
+import { listFindingIds } from '@/db/queries/findings';
 import type { Tx } from '@/db/scope';
 import type { OfficeContext } from '@/lib/access/context';
 import { requirePermission } from '@/lib/access/permissions';
 import { checked } from '@/lib/contract/errors';
 import { analysisQuery, type AnalysisView } from '@/lib/contract/submission';
-import type { ScheduleState } from '@/lib/schedule/weight';
 import { idOf, inOffice } from '@/lib/services/in-office';
 import { loadState } from '@/lib/services/schedule/load';
 import { blockingOf, computed, loopsOf, type ReadState } from '@/lib/services/schedule/state';
@@ -26,13 +25,12 @@ export async function getAnalysis(
     const read = await loadState(tx, row.submission, state);
     const analysis = computed(read);
     if (analysis) return analysisView(state, read.list, analysis, datesOf(row));
-    return { computable: false, state, loops: loopsOf(read), because: await because(tx, id, state, read) };
+    return { computable: false, state, loops: loopsOf(read), because: await because(tx, id, read) };
   });
 }
 
 /** Ids of the findings in the way; of a proposed state those that are known by their key. */
-export async function because(tx: Tx, id: string, state: ScheduleState, read: ReadState): Promise<string[]> {
-  if (state !== 'proposed') return listBlocking(tx, id, state);
+export function because(tx: Tx, id: string, read: ReadState): Promise<string[]> {
   return listFindingIds(
     tx,
     id,

@@ -33,7 +33,7 @@ export async function getChance(
     const analysis = computed(read);
     if (analysis) return answer(question, analysis, datesOf(row));
     throw new Conflict('The finish cannot be computed while these findings stand in the way.', {
-      members: { because: await because(tx, id, question.state, read) },
+      members: { because: await because(tx, id, read) },
     });
   });
 }

@@ -1,5 +1,5 @@
 import { findProject, type ProjectRow } from '@/db/queries/projects';
-import { insertSubmission } from '@/db/queries/submissions';
+import { findLatest, insertSubmission } from '@/db/queries/submissions';
 import { storable } from '@/db/storable';
 import type { OfficeContext } from '@/lib/access/context';
 import { requirePermission } from '@/lib/access/permissions';
@@ -23,11 +23,14 @@ import { submissionView } from './view';
 /** Takes a file in as the project's next revision: reads, audits and computes it, then keeps all of it or nothing. */
 export async function createSubmission(
   ctx: OfficeContext,
-  { path, form }: { path: { project: string }; form: Form },
+  { path, form, arrived = new Date() }: { path: { project: string }; form: Form; arrived?: Date },
 ): Promise<SubmissionView> {
   requirePermission(ctx, 'submissions:create');
   const projectId = idOf(path.project, 'project');
-  const row: ProjectRow = found(await inOffice(ctx, (tx) => findProject(tx, projectId)), 'project');
+  const before = await inOffice(ctx, async (tx) => {
+    return { row: await findProject(tx, projectId), latest: await findLatest(tx, projectId) };
+  });
+  const row: ProjectRow = found(before.row, 'project');
 
   const { file, sheets, wanted } = readUpload(form);
   const digest = sha256(file.bytes);
@@ -42,7 +45,8 @@ export async function createSubmission(
 
   const id = crypto.randomUUID();
   const view = await inOffice(ctx, async (tx) => {
-    const revision = await nextRevision(tx, projectId, digest, form.fields.again?.[0] === 'true');
+    const repeat = { arrived, seen: before.latest, again: form.fields.again?.[0] };
+    const revision = await nextRevision(tx, projectId, digest, repeat);
     const values = {
       id,
       officeId: ctx.office.id,
@@ -52,12 +56,11 @@ export async function createSubmission(
       fileName: file.name,
       fileSha256: digest,
       fileBytes: file.bytes.byteLength,
-      ...how,
-      rows: { counts: state.list.rows, refused: state.list.refused },
-      summary,
+      ...storable({ ...how, rows: { counts: state.list.rows, refused: state.list.refused }, summary }),
       receivedBy: ctx.user.id,
+      receivedAt: new Date(),
     };
-    await insertSubmission(tx, storable(values), file.bytes);
+    await insertSubmission(tx, values, file.bytes);
     await storeList(tx, ctx, id, state.list, audit);
     await recordReceived(tx, ctx, id, {
       revision,

@@ -10,15 +10,25 @@ import type { ActivityList } from '@/lib/schedule/activity-list';
 import { listedActivities } from '@/lib/services/activities/view';
 import { appendRecord } from '@/lib/services/record/append';
 
+/** What the sender knew of the latest revision, and says of a file that is the same. */
+interface Repeat {
+  readonly arrived: Date;
+  readonly seen: { readonly id: string } | null;
+  /** `true`: it is meant; `false`: it is not; else it is taken to be, unless it is a second click. */
+  readonly again: string | undefined;
+}
+
 /**
  * The number of the next revision, for which this transaction alone holds the project from here on. The very
- * file that came last is taken again only where that is said: most often it is a second click.
+ * file that came last is refused where it came while this one was on its way, which is a second click.
  */
-export async function nextRevision(tx: Tx, project: string, sha256: string, again: boolean): Promise<number> {
+export async function nextRevision(tx: Tx, project: string, sha256: string, repeat: Repeat): Promise<number> {
   await lockProject(tx, project);
   const latest = await findLatest(tx, project);
   if (!latest) return 0;
-  if (latest.fileSha256 === sha256 && !again) {
+  const cameMeanwhile = latest.id !== repeat.seen?.id || latest.receivedAt >= repeat.arrived;
+  const isUnmeant = repeat.again === 'false' || (repeat.again !== 'true' && cameMeanwhile);
+  if (latest.fileSha256 === sha256 && isUnmeant) {
     throw new Conflict(`This very file is already Rev ${latest.revision}.`, {
       members: { submission: latest.id, revision: latest.revision },
     });

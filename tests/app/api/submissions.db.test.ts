@@ -225,7 +225,9 @@ describe('a second file', () => {
     expect(both.map((answer) => answer.status).sort()).toEqual([201, 409]);
     const refused = both.find((answer) => answer.status === 409);
     expect((await json<Problem>(refused!)).detail).toMatch(/^This very file is already Rev \d+\.$/);
+    expect((await upload(token, cast.projects.rig, list, { again: 'false' })).status).toBe(409);
     expect((await upload(token, cast.projects.rig, list, { again: 'true' })).status).toBe(201);
+    expect((await upload(token, cast.projects.rig, list)).status).toBe(201);
   });
 
   it('gets a number of its own when several come at once', async () => {

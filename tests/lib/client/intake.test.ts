@@ -6,7 +6,8 @@ const file = new File(['ID,m\nA,3\n'], 'list.csv', { type: 'text/csv' });
 describe('uploadForm', () => {
   it('leaves to the server what was not settled', () => {
     const form = uploadForm(file);
-    expect([...form.keys()]).toEqual(['file']);
+    expect(form.get('again')).toBe('false');
+    expect([...form.keys()]).toEqual(['again', 'file']);
   });
 
   it('names each sheet, the columns as JSON, and the header row', () => {
