@@ -51,7 +51,7 @@ export function chanceWorking(place: WorkingPlace, target: string, result: strin
   };
 }
 
-export function stateWords(state: ScheduleState): string {
+function stateWords(state: ScheduleState): string {
   return state === 'proposed' ? 'with proposed fixes adopted' : `as ${state}`;
 }
 

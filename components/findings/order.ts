@@ -29,7 +29,7 @@ const byCell: Compare = (x, y) =>
   collator.compare(x.cell ?? '', y.cell ?? '');
 
 /** Days the finish moves by, whichever way; what blocks costs the whole answer. */
-export function cost(finding: FindingView): number {
+function cost(finding: FindingView): number {
   if (finding.weight === 'blocks' && finding.state === 'open') return Infinity;
   return Math.abs(finding.fix?.effect?.expectedDuration ?? 0);
 }

@@ -8,7 +8,7 @@ import { submissionPath } from './submissions';
 
 export type RecordEntries = { readonly items: readonly RecordEntryView[] };
 
-export function recordKey(office: string, submission: string) {
+function recordKey(office: string, submission: string) {
   return keys.submissionPart(office, submission, 'record');
 }
 

@@ -15,7 +15,7 @@ export const COMPARED = {
   pessimistic: 'Pessimistic (b)',
   predecessors: 'Predecessors',
 } as const;
-export type ComparedField = keyof typeof COMPARED;
+type ComparedField = keyof typeof COMPARED;
 
 type Value = string | number | null;
 

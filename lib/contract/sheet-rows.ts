@@ -10,7 +10,7 @@ export const sheetRowsQuery = z.object({
 });
 
 /** One column that holds a field of the list, in the sheet's order. */
-export const sheetColumnView = z.object({
+const sheetColumnView = z.object({
   /** 0 = column A. */
   index: z.int(),
   letters: z.string(),
@@ -21,7 +21,7 @@ export const sheetColumnView = z.object({
 export type SheetColumnView = z.infer<typeof sheetColumnView>;
 
 /** The three estimates of the activity that a row begins, in working days; null where a cell gives none. */
-export const rowEstimates = z.object({
+const rowEstimates = z.object({
   optimistic: z.number().nullable(),
   likely: z.number().nullable(),
   pessimistic: z.number().nullable(),
