@@ -103,7 +103,7 @@ test('a workbook goes in; findings, the recomputed path and a corrected workbook
       .first()
       .click();
     await page
-      .getByLabel('Activity list')
+      .locator('input[type=file]')
       .setInputFiles({ ...(await slipwayFile('slipway-rev-1.xlsx')), buffer: corrected });
     await page.waitForURL(/\/submissions\//);
     await expect(page.getByRole('heading', { level: 1, name: /Slipway renewal, Rev 1/ })).toBeVisible();

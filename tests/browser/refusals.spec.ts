@@ -43,7 +43,8 @@ test.describe('refused with a sentence, and nothing kept', () => {
         .getByRole('link', { name: /Millrace intake screens/ })
         .first()
         .click();
-      await expect(page.getByText('Rev 1')).toHaveCount(0);
+      await expect(page.getByRole('link', { name: /^Rev 0/ }).first()).toBeVisible();
+      await expect(page.getByRole('link', { name: /^Rev 1/ })).toHaveCount(0);
     });
   }
 });

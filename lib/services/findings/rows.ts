@@ -15,6 +15,7 @@ export type FindingDraft = Omit<NewFinding, 'id' | 'origin' | 'position'> & {
 
 /** What the audit of a state found, with the finish effect of each fix; null effects where it is not computable. */
 export function draftFindings(state: ReadState): FindingDraft[] {
+  const namesByRow = new Map(state.list.activities.map((each) => [`${each.row} ${each.sheet}`, each.name]));
   const effects = computed(state) ? prepareEffects(state.network) : null;
   const drafts = state.findings.map((finding) => ({
     key: finding.key,
@@ -23,7 +24,7 @@ export function draftFindings(state: ReadState): FindingDraft[] {
     message_id: finding.message,
     data: finding.data,
     activity_id: finding.activityId,
-    activity_name: nameOf(finding, state),
+    activity_name: nameOf(finding, state, namesByRow),
     sheet: finding.sheet,
     row: finding.row,
     cell: finding.cell,
@@ -53,7 +54,14 @@ function draftFix({ reason, edits }: Fix, rank: number, effect: Effect | null): 
   };
 }
 
-function nameOf({ activityId }: Finding, { list }: ReadState): string | null {
+/** By its own row first: where two rows bear one ID, each has the name beside it. */
+function nameOf(
+  { activityId, sheet, row }: Finding,
+  { list }: ReadState,
+  namesByRow: ReadonlyMap<string, string>,
+): string | null {
+  const beside = namesByRow.get(`${row} ${sheet}`);
+  if (beside !== undefined) return beside === '' ? null : beside;
   if (activityId === null) return null;
   const index = list.indexOf.get(activityId);
   return index === undefined ? null : (list.activities[index]?.name ?? null);
