@@ -89,7 +89,8 @@ export class Gates {
 
   private select(last: number, behind: Longest): Gate {
     const gate = { activity: [-1], length: [behind.length], variance: [behind.variance], others: -Infinity };
-    for (let r = 0; r <= last; r++) {
+    // Those close to the gate tend to stand furthest: from there, few have to make room.
+    for (let r = last; r >= 0; r--) {
       const length = this.length[r]!;
       if (length <= gate.others) continue;
       let k = gate.length.length;

@@ -15,6 +15,9 @@ interface Bite {
   readonly last: number;
 }
 
+/** Activities followed before a gate is looked for: most effects end sooner, and a gate has to be made. */
+const PATIENCE = 32;
+
 /**
  * Works out anew what the changes touch and what follows from it, in order, and gives the figures. It stops at
  * the first gate behind the changes: from there on every path is as long as it was.
@@ -23,17 +26,20 @@ export function propagate(base: Base, changes: readonly NetworkChange[], reach: 
   const { working, order, queue, moved, gates, lateStart } = base;
   const { earlyStart, chainVariance, altered } = working;
   const bite = biteOf(base, changes);
-  let gate = gates.from(Math.max(bite.last, order.mendedTo));
-  for (let r = queue.take(), skipped = 1; r !== -1; r = queue.take()) {
-    if (r > gates.rank(gate)) {
+  const behind = Math.max(bite.last, order.mendedTo);
+  let gate: number | null = null;
+  let wait = PATIENCE;
+  for (let r = queue.take(), steps = 0; r !== -1; r = queue.take(), steps++) {
+    if (gate !== null && r > gates.rank(gate)) {
       const figures = figuresAt(base, bite.activities, gates.at(gate), gates.rank(gate));
       if (figures) {
         queue.clear();
         return figures;
       }
-      gate = gates.from(r) + skipped;
-      skipped *= 2;
+      gate = null;
+      wait *= 2;
     }
+    if (gate === null && steps >= wait) gate = gates.from(Math.max(behind, r));
     const activity = order.order[r]!;
     const startBefore = earlyStart[activity]!;
     const varianceBefore = chainVariance[activity]!;
