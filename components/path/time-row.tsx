@@ -78,7 +78,9 @@ function Bar({ activity, standing, scale }: Pick<Props, 'activity' | 'standing' 
   const worst = scale.x(activity.earlyStart + activity.pessimistic);
   return (
     <>
-      <path d={`M${best} 5v4M${best} 7H${worst}M${worst} 5v4`} stroke="var(--ink)" fill="none" />
+      {worst > best && (
+        <path d={`M${best} 5v4M${best} 7H${worst}M${worst} 5v4`} stroke="var(--ink)" fill="none" />
+      )}
       <rect
         x={left}
         y="11"
