@@ -2,7 +2,7 @@ import { and, asc, eq, inArray, sql } from 'drizzle-orm';
 import type { MessageData } from '@/lib/audit/rule';
 import type { FindingState, Weight } from '@/lib/schedule/weight';
 import type { Tx } from '../client';
-import { findings, type FindingOrigin } from '../schema';
+import { findings, fixes, type FindingOrigin } from '../schema';
 import { among, inBatches } from './bulk';
 
 export interface NewFinding {
@@ -106,8 +106,13 @@ export async function updateFindings(tx: Tx, rows: readonly FindingChange[]): Pr
   );
 }
 
+/**
+ * Their fixes go first: a withdrawn correction points at both, and letting go of one of the two while the other
+ * has just gone in the same statement is refused.
+ */
 export async function deleteFindings(tx: Tx, submissionId: string, ids: readonly string[]): Promise<void> {
   if (ids.length === 0) return;
+  await tx.delete(fixes).where(and(eq(fixes.submissionId, submissionId), among(fixes.findingId, ids)));
   await tx.delete(findings).where(and(eq(findings.submissionId, submissionId), among(findings.id, ids)));
 }
 

@@ -1,4 +1,4 @@
-import { asc, count, eq, isNull, sql } from 'drizzle-orm';
+import { asc, eq, isNull, sql } from 'drizzle-orm';
 import type { Tx } from '../client';
 import { recordEntries } from '../schema';
 
@@ -33,9 +33,4 @@ export async function listRecord(tx: Tx, submissionId: string) {
     .from(recordEntries)
     .where(ofChain(submissionId))
     .orderBy(asc(recordEntries.sequence));
-}
-
-export async function countRecord(tx: Tx, submissionId: string): Promise<number> {
-  const [row] = await tx.select({ count: count() }).from(recordEntries).where(ofChain(submissionId));
-  return row?.count ?? 0;
 }

@@ -73,11 +73,6 @@ export class Invalid extends Refusal {
   }
 }
 
-export class TooMany extends Refusal {
-  readonly status = 429;
-  readonly title = 'Too many attempts';
-}
-
 export class Unavailable extends Refusal {
   readonly status = 503;
   readonly title = 'Not available';

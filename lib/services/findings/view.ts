@@ -45,7 +45,7 @@ function toView(finding: FindingRow, fixes: readonly FixRow[], comments: number)
   };
 }
 
-export function fixView({ id, state, reason, edits, effectExpected, effectVariance }: FixRow): FixView {
+function fixView({ id, state, reason, edits, effectExpected, effectVariance }: FixRow): FixView {
   return {
     id,
     state,
