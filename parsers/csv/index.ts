@@ -29,6 +29,10 @@ export function readCsv(bytes: Uint8Array): Sheet {
   while (cursor.next()) {
     if (cells.length >= LIMITS.columns)
       throw damaged('A record of this file has more fields than a sheet has columns.');
+    if (cursor.value.length > LIMITS.textLength)
+      throw damaged(
+        `Record ${cursor.record} of this file holds a text longer than a cell can hold; perhaps a quotation mark is missing.`,
+      );
     const value = cellText(cursor.value);
     cells.push(value === '' ? null : ERROR.test(value) ? new ErrorValue(value) : value);
     if (value !== '') filled = cells.length;

@@ -1,3 +1,5 @@
+import { damaged } from '@/parsers/errors';
+import { LIMITS } from '@/parsers/limits';
 import { decodeText } from './text';
 
 export const LESS = 60;
@@ -111,6 +113,8 @@ export class Scanner {
     const start = this.at;
     const end = this.bytes.indexOf(LESS, start);
     if (end < 0) throw new Unusual();
+    if (end - start > LIMITS.textBytes)
+      throw damaged('A cell of this workbook holds a text longer than a cell can hold.');
     this.at = end;
     return start;
   }

@@ -1,3 +1,5 @@
+import { UnreadableFile } from '@/parsers/errors';
+import { LIMITS } from '@/parsers/limits';
 import { scanString } from './scan-string';
 import { bytesOf, isPlain, Scanner, Unusual } from './scanner';
 import { unescapeText } from './text';
@@ -29,6 +31,7 @@ function scanTable(scanner: Scanner): string[] {
   while (scanner.tag() !== 47) {
     if (!scanner.takes(ITEM)) throw new Unusual();
     scanner.skipAttributes();
+    if (strings.length >= LIMITS.sharedStrings) throw new UnreadableFile('too-many-cells');
     strings.push(scanner.empty ? '' : unescapeText(scanString(scanner, ITEM)));
   }
   scanner.at--;
@@ -41,20 +44,25 @@ function parseTable(bytes: Uint8Array, part: string): string[] {
   let text = '';
   let inText = false;
   let phonetic = false;
-  readXml(bytes, part, {
-    open(element) {
-      if (element === 'si') text = '';
-      else if (element === 'rPh') phonetic = true;
-      else if (element === 't') inText = !phonetic;
+  readXml(
+    bytes,
+    part,
+    {
+      open(element) {
+        if (element === 'si') text = '';
+        else if (element === 'rPh') phonetic = true;
+        else if (element === 't') inText = !phonetic;
+      },
+      text(piece) {
+        if (inText) text += piece;
+      },
+      close(element) {
+        if (element === 'si') strings.push(unescapeText(text));
+        else if (element === 'rPh') phonetic = false;
+        else if (element === 't') inText = false;
+      },
     },
-    text(piece) {
-      if (inText) text += piece;
-    },
-    close(element) {
-      if (element === 'si') strings.push(unescapeText(text));
-      else if (element === 'rPh') phonetic = false;
-      else if (element === 't') inText = false;
-    },
-  });
+    LIMITS.cellElements,
+  );
   return strings;
 }

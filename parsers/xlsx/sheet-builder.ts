@@ -74,6 +74,8 @@ export class SheetBuilder {
   }
 
   setText(column: number, text: string): void {
+    if (text.length > LIMITS.textLength)
+      throw damaged('A cell of this workbook holds a text longer than a cell can hold.');
     if (text !== '') this.set(column, text);
   }
 

@@ -1,6 +1,7 @@
 import { ErrorValue, type Sheet } from '@/lib/schedule/sheet';
 import { columnIndex, parseAddress } from '@/lib/schedule/cell';
 import { damaged } from '@/parsers/errors';
+import { LIMITS } from '@/parsers/limits';
 import { scanRows } from './scan-sheet';
 import { bytesOf, isPlain, Scanner, Unusual } from './scanner';
 import { SheetBuilder, type WorkbookContext } from './sheet-builder';
@@ -53,14 +54,19 @@ function parseSheet(bytes: Uint8Array, entry: SheetEntry, workbook: WorkbookCont
   const around: Around = { merges: [], hiddenColumns: [] };
   const outer = aroundHandler(around);
   const cells = cellHandler(builder);
-  readXml(bytes, entry.part, {
-    open(name, attributes) {
-      outer.open?.(name, attributes);
-      cells.open?.(name, attributes);
+  readXml(
+    bytes,
+    entry.part,
+    {
+      open(name, attributes) {
+        outer.open?.(name, attributes);
+        cells.open?.(name, attributes);
+      },
+      text: cells.text,
+      close: cells.close,
     },
-    text: cells.text,
-    close: cells.close,
-  });
+    LIMITS.cellElements,
+  );
   return toSheet(builder, around, entry, workbook);
 }
 

@@ -1,5 +1,6 @@
 import { SaxesParser } from 'saxes';
 import { damaged, UnreadableFile } from '@/parsers/errors';
+import { LIMITS } from '@/parsers/limits';
 
 /** Called for elements of the namespaces a workbook is made of; others are passed over. */
 export interface XmlHandler {
@@ -18,14 +19,23 @@ const NAMESPACES = new Set([
 ]);
 const CHUNK = 256 * 1024;
 const DEPTH_MAX = 200;
+/** Characters without a tag: beyond what a cell's text, or the space between cells, can be. */
+const QUIET_MAX = 4 * 1024 * 1024;
 
 /**
  * Reads a part of a workbook strictly: well-formed, namespaces resolved, no document type. Attributes come
- * by their local name. Throws UnreadableFile.
+ * by their local name. Throws UnreadableFile, also where the part has more elements than given.
  */
-export function readXml(bytes: Uint8Array, part: string, handler: XmlHandler): void {
+export function readXml(
+  bytes: Uint8Array,
+  part: string,
+  handler: XmlHandler,
+  elements: number = LIMITS.otherElements,
+): void {
   const parser = new SaxesParser({ xmlns: true, position: false });
   let depth = 0;
+  let count = 0;
+  let quiet = 0;
   parser.on('error', () => {
     throw damaged(`The part ${part} inside this workbook is not well-formed.`);
   });
@@ -36,6 +46,8 @@ export function readXml(bytes: Uint8Array, part: string, handler: XmlHandler): v
     );
   });
   parser.on('opentag', (tag) => {
+    quiet = 0;
+    if (++count > elements) throw new UnreadableFile('too-many-cells');
     if (++depth > DEPTH_MAX) throw damaged(`The part ${part} inside this workbook is nested too deeply.`);
     if (!NAMESPACES.has(tag.uri)) return;
     const attributes: Record<string, string> = Object.create(null);
@@ -46,6 +58,7 @@ export function readXml(bytes: Uint8Array, part: string, handler: XmlHandler): v
   });
   parser.on('closetag', (tag) => {
     depth--;
+    quiet = 0;
     if (NAMESPACES.has(tag.uri)) handler.close?.(tag.local);
   });
   const text = handler.text?.bind(handler);
@@ -53,7 +66,12 @@ export function readXml(bytes: Uint8Array, part: string, handler: XmlHandler): v
     parser.on('text', text);
     parser.on('cdata', text);
   }
-  for (const chunk of decode(bytes, part)) parser.write(chunk);
+  for (const chunk of decode(bytes, part)) {
+    quiet += chunk.length;
+    if (quiet > QUIET_MAX)
+      throw damaged(`The part ${part} inside this workbook holds a text longer than a cell can hold.`);
+    parser.write(chunk);
+  }
   parser.close();
 }
 

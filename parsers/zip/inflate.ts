@@ -7,6 +7,8 @@ import type { ZipArchive, ZipEntry } from './directory';
 /** Deflate cannot do better than this (zlib technical details: 1032 to 1). */
 const BEST_RATIO = 1032;
 const SLICE = 16 * 1024;
+const PART_TOO_LARGE =
+  'A part of this workbook unpacks to more than 300 MB. Send a workbook that holds only the activity list.';
 
 /** The entry's bytes as they stand in the archive, packed or not. */
 export function packedBytes(archive: ZipArchive, entry: ZipEntry): Uint8Array {
@@ -15,6 +17,7 @@ export function packedBytes(archive: ZipArchive, entry: ZipEntry): Uint8Array {
 
 /** The entry's content; throws UnreadableFile where it is damaged or larger than declared. */
 export function unpack(archive: ZipArchive, entry: ZipEntry): Uint8Array {
+  if (entry.size > LIMITS.partBytes) throw new UnreadableFile('unpacks-too-large', PART_TOO_LARGE);
   const packed = packedBytes(archive, entry);
   const bytes = entry.method === 0 ? packed : inflate(packed, entry);
   if (bytes.length !== entry.size || crc32(bytes) !== entry.crc) throw brokenPart(entry);

@@ -170,6 +170,7 @@ describe('what is no text', () => {
   it('has limits', () => {
     expect(codeOf(bytesOf('A\n'.repeat(201_001)))).toBe('too-many-rows');
     expect(codeOf(bytesOf(`${','.repeat(16_384)}A`))).toBe('damaged');
+    expect(codeOf(bytesOf(`A,"${'x\n'.repeat(20_000)}"`))).toBe('damaged');
     expect(codeOf(bytesOf(`${'\n'.repeat(1_000_000)}A`))).toBe('read');
   });
 });

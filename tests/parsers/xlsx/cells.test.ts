@@ -133,6 +133,26 @@ describe('limits', () => {
     expect(() => values(row('<c t="s"><v>3</v></c>'), { strings: '<si><t>x</t></si>' })).toThrow(/not in it/);
   });
 
+  it('refuses a text longer than a cell can hold, by either reader', () => {
+    const long = (length: number) => row(`<c t="str"><v>${'x'.repeat(length)}</v></c>`);
+    expect(values(long(32_767)).A1).toHaveLength(32_767);
+    for (const rows of [
+      long(32_768),
+      long(500_000),
+      `<!-- x -->${long(32_768)}`,
+      `<!-- x -->${long(5_000_000)}`,
+      `<!-- x -->${' '.repeat(5_000_000)}`,
+    ]) {
+      expect(() => values(rows)).toThrow(/longer than a cell can hold/);
+    }
+  });
+
+  it('refuses a part with more elements than a workbook has', () => {
+    const merged = '<mergeCell ref="A1:B1"/>'.repeat(1_000_001);
+    const sheet = `<worksheet xmlns="${MAIN}"><sheetData>${row('<c><v>1</v></c>')}</sheetData><mergeCells>${merged}</mergeCells></worksheet>`;
+    expect(() => values(sheet)).toThrow(/more cells/);
+  });
+
   it('refuses more rows than a list may have', () => {
     const rows = Array.from({ length: 201_001 }, () => '<row><c><v>1</v></c></row>').join('');
     expect(() => values(rows)).toThrow(/200 000 rows/);
