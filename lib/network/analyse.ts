@@ -5,7 +5,7 @@ import { findTangles } from './tangles';
 import type { Analysis, Network, Tangle } from './types';
 
 /** Critical paths that are listed; all are counted. */
-export const LISTED_PATHS = 50;
+const LISTED_PATHS = 50;
 
 /**
  * The recomputed schedule: times and floats in working days from time 0, critical paths and the largest

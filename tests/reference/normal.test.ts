@@ -1,5 +1,6 @@
 import cdf from '@stdlib/stats-base-dists-normal-cdf';
 import fc from 'fast-check';
+import { normal as jStat } from 'jstat';
 import { describe, expect, it } from 'vitest';
 import {
   AREA_FROM_ZERO,
@@ -62,5 +63,29 @@ describe('an independent package', () => {
       }),
       { numRuns: 1000 },
     );
+  });
+});
+
+describe('jStat', () => {
+  const z = fc.double({ min: -5, max: 5, noNaN: true });
+
+  it('agrees within its usual range', () => {
+    fc.assert(
+      fc.property(z, (x) => {
+        expect(normalCdf(x)).toBeCloseTo(jStat.cdf(x, 0, 1), 8);
+        expect(normalDensity(x)).toBeCloseTo(jStat.pdf(x, 0, 1), 12);
+        const p = normalCdf(x);
+        if (p > 1e-5 && p < 1 - 1e-5) expect(normalQuantile(p)).toBeCloseTo(jStat.inv(p, 0, 1), 6);
+      }),
+      { numRuns: 1000 },
+    );
+  });
+
+  it('has lost the lower tail where ours still holds it, which is why we have our own', () => {
+    const off = (value: number, exact: number) => Math.abs(value / exact - 1);
+    // Φ(−10), Abramowitz and Stegun (1964), Table 26.2.
+    const exact = 10 ** -23.11805;
+    expect(off(normalCdf(-10), exact)).toBeLessThan(1e-4);
+    expect(off(jStat.cdf(-10, 0, 1), exact)).toBeGreaterThan(0.5);
   });
 });

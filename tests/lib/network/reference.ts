@@ -64,7 +64,7 @@ export function reference(list: ActivityList): ReferenceSchedule {
   return { finish, earlyStart, lateStart, freeFloat, critical, paths, variance: Math.max(...sums) };
 }
 
-export function moments(list: ActivityList): { days: number[]; spread: number[] } {
+function moments(list: ActivityList): { days: number[]; spread: number[] } {
   const three = list.activities.map(({ optimistic, likely, pessimistic }) => {
     const m = likely.days ?? 0;
     return [optimistic.days ?? m, m, pessimistic.days ?? m] as const;
