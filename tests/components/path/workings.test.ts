@@ -20,7 +20,7 @@ describe('worked lines', () => {
     });
     expect(expectedWorking(work, format)).toMatchObject({
       figures: '(2 + 4 × 4.5 + 10) / 6',
-      result: '5.0000\u202fd',
+      result: '5.0000\u00a0d',
     });
     expect(varianceWorking(work, format)).toMatchObject({ figures: '((10 − 2) / 6)²', result: '1.7778 d²' });
   });
