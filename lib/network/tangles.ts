@@ -15,13 +15,18 @@ export function findTangles(network: Network): Tangle[] {
   const { count, successorStart, successor } = network;
   const components = tangledComponents({ count, start: successorStart, target: successor });
   const local = new Int32Array(count).fill(-1);
-  const budget = { left: WORK };
-  return components.map((activities) => {
-    activities.forEach((activity, i) => (local[activity] = i));
-    const tangle = untangle(network, activities, local, budget);
-    for (const activity of activities) local[activity] = -1;
-    return tangle;
-  });
+  // The small ones first, each with its share: what they leave over is for the large.
+  const budget = { left: 0 };
+  const tangles = components
+    .toSorted((a, b) => a.length - b.length)
+    .map((activities) => {
+      activities.forEach((activity, i) => (local[activity] = i));
+      budget.left = Math.max(0, budget.left) + WORK / components.length;
+      const tangle = untangle(network, activities, local, budget);
+      for (const activity of activities) local[activity] = -1;
+      return tangle;
+    });
+  return tangles.sort((a, b) => a.activities[0]! - b.activities[0]!);
 }
 
 /** The links of one pair. */
