@@ -21,7 +21,7 @@ export interface SignedIn {
 /** Throws with the sentence to show; which of the two was wrong is not told. */
 export async function signIn(email: string, password: string, address: string): Promise<SignedIn> {
   const account = email.trim().toLowerCase();
-  const wait = Math.max(byEmail.wait(account), byAddress.wait(address));
+  const wait = Math.max(byEmail.wait(account), address === '' ? 0 : byAddress.wait(address));
   if (wait > 0) {
     throw new Error(`Too many attempts failed. Try again in ${minutes(wait)}.`);
   }
