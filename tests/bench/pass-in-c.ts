@@ -4,7 +4,7 @@ import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import type { Network } from '@/lib/network';
 
-const ROUNDS = 9;
+const ROUNDS = 15;
 const SOURCE = join(import.meta.dirname, 'pass.c');
 
 /** Median milliseconds of the same pass in plain C; null where there is no C compiler. */
