@@ -4,7 +4,7 @@ import { type Cluster, freePort } from '@/db/cluster';
 import { chromium } from './apt';
 import { ensureBuilt } from './build';
 import { runProgram } from './child';
-import { type Ending, Interrupted, untilEnded } from './ending';
+import { type Ending, Interrupted, throwIfStopping, untilEnded } from './ending';
 import { exitCode, explain } from './explain';
 import { connectedTo, DATABASE, openLocalDatabase, seed } from './local-database';
 import { serve } from './serve';
@@ -56,6 +56,7 @@ async function attempt<T>(work: () => Promise<T>): Promise<{ value: T | null; co
 }
 
 async function stage(name: string, work: () => Promise<Counts>): Promise<Counts> {
+  throwIfStopping();
   say(`\n${name}`);
   const { value, counts } = await attempt(work);
   return value ?? counts;
