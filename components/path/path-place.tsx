@@ -11,17 +11,17 @@ import { SHOWN, type Shown } from './rows';
 import { StateSwitch } from './state-switch';
 import { usePlace } from './use-place';
 
-export const VIEWS = { chain: 'Chain', time: 'Time', table: 'Table' } as const;
+export const VIEWS = { drawn: 'Drawn', table: 'Table' } as const;
 export type View = keyof typeof VIEWS;
 
 const NEAR = [1, 2, 5, 10, 20];
 
-/** The recomputed critical path: as a chain, over time, and as a table of every figure. */
+/** The recomputed critical path: drawn as a chain and over time, and as a table of every figure. */
 export function PathPlace({ office, submission }: { office: string; submission: string }) {
   const { search, set, state } = usePlace();
   const head = useSubmission(office, submission);
   const analysis = useAnalysis(office, submission, state);
-  const view = keyOf(VIEWS, search.get('view')) ?? 'chain';
+  const view = keyOf(VIEWS, search.get('view')) ?? 'drawn';
   const shown = keyOf(SHOWN, search.get('show')) ?? 'all';
   const near = NEAR.find((days) => String(days) === search.get('near')) ?? 2;
   const select = useCallback((id: string) => set({ activity: id }), [set]);

@@ -36,8 +36,12 @@ export function PathViews(props: PathViewsProps) {
   const activity = selected === null ? undefined : byId.get(selected);
   return (
     <div className={activity ? 'grid items-start gap-4 xl:grid-cols-[minmax(0,1fr)_340px]' : 'grid gap-4'}>
-      {view === 'chain' && <ChainPanel {...props} />}
-      {view === 'time' && <TimePanel {...props} />}
+      {view === 'drawn' && (
+        <div className="grid min-w-0 gap-4">
+          <ChainPanel {...props} />
+          <TimePanel {...props} />
+        </div>
+      )}
       {view === 'table' && (
         <Panel
           title="Every activity, every figure"

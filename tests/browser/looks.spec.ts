@@ -10,7 +10,7 @@ const OFFICE_PAGES = [
   '/demo/rules',
   '/demo/rules/loop',
 ];
-const PLACES = ['', '/path', '/path?view=time', '/path?view=table', '/confidence', '/compare', '/record'];
+const PLACES = ['', '/path', '/path?view=table', '/confidence', '/compare', '/record'];
 const WIDTHS = [320, 1440];
 
 async function settle(page: Page, path: string): Promise<void> {

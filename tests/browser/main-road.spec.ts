@@ -71,7 +71,6 @@ test('a workbook goes in; findings, the recomputed path and a corrected workbook
   await test.step('the path is shown as a chain, over time and as a table', async () => {
     await page.getByRole('link', { name: /^Path/ }).click();
     await expect(page.getByRole('heading', { name: /activities set the finish/ })).toBeVisible();
-    await page.getByRole('button', { name: 'Time' }).click();
     await expect(page.getByRole('region', { name: 'Time chart' })).toBeVisible();
     await page.getByRole('button', { name: 'Table' }).click();
     await expect(page.getByRole('columnheader', { name: 'Free float' })).toBeVisible();
