@@ -1,3 +1,4 @@
+import { applyCorrections } from '@/lib/corrections';
 import type { Sheet } from '@/lib/schedule/sheet';
 import { readSheets, UnreadableFile } from '@/parsers';
 import { type Dialect, readDialect } from '@/parsers/csv';
@@ -5,9 +6,11 @@ import { changedCells } from './changed-cells';
 import { checkFile } from './check';
 import { patchCsv } from './csv';
 import type { ChangedCell, GiveBackInput, GivenBack, Patched } from './types';
+import { recalculate } from './recalculate';
 import { patchXlsx } from './xlsx';
 
 export { changesCsv } from './csv';
+export { recalculate } from './recalculate';
 export type { Check, GiveBackInput, GivenBack, ListedChange } from './types';
 
 const WORKBOOK_TYPE = 'application/vnd.openxmlformats-officedocument.spreadsheetml.sheet';
@@ -43,7 +46,7 @@ export function giveBack(input: GiveBackInput): GivenBack {
   const received = input.sheets ?? readSheets(bytes, fileName);
   const cells = changedCells(received, corrections);
   const dialect = isZip(bytes) ? null : readDialect(bytes).dialect;
-  const patched = patch(input, cells, dialect);
+  const patched = patch(input, received, cells, dialect);
   const { sheets, remarks } =
     patched.bytes === bytes ? { sheets: received, remarks: [] } : readAgain(patched, fileName);
   return {
@@ -58,12 +61,15 @@ export function giveBack(input: GiveBackInput): GivenBack {
 }
 
 function patch(
-  { bytes, changes }: GiveBackInput,
+  { bytes, changes, corrections }: GiveBackInput,
+  received: readonly Sheet[],
   cells: readonly ChangedCell[],
   dialect: Dialect | null,
 ): Patched {
   if (cells.length === 0) return { bytes, remarks: [], refused: [] };
-  return dialect ? patchCsv(bytes, dialect, cells) : patchXlsx(bytes, cells, changes);
+  if (dialect) return patchCsv(bytes, dialect, cells);
+  const { results } = recalculate(received, applyCorrections(received, corrections));
+  return patchXlsx(bytes, cells, changes, results);
 }
 
 /** A list that was as long as a list may be can become too long by the sheet that lists its changes. */

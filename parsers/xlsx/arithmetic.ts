@@ -1,37 +1,47 @@
-/** What an operand gives: a number, an error code, or nothing that plain arithmetic can use. */
-export type Operand = number | { readonly error: string } | null;
+import { callFunction, isOnLists, type Operand, PLAIN_FUNCTIONS } from './arithmetic-functions';
 
 export interface Operands {
   /** A cell, by sheet ('' the formula's own), row from 1 and column from 0. */
   cell(sheet: string, row: number, column: number): Operand;
-  /** Sum of the numbers in a block of cells. */
-  sum(sheet: string, top: number, left: number, bottom: number, right: number): Operand;
+  /** The numbers in a block of cells. */
+  numbers(
+    sheet: string,
+    top: number,
+    left: number,
+    bottom: number,
+    right: number,
+  ): readonly number[] | { readonly error: string } | null;
 }
 
 const TOKEN =
-  /\s*(?:(\d+\.?\d*(?:[eE][+-]?\d+)?|\.\d+(?:[eE][+-]?\d+)?)|((?:'(?:[^']|'')+'|[A-Za-z_][\w.]*)!)?\$?([A-Za-z]{1,3})\$?(\d{1,7})(?![\w(!.])|(SUM)(?=\s*\()|([-+*/(),:]))/iy;
+  /\s*(?:(\d+\.?\d*(?:[eE][+-]?\d+)?|\.\d+(?:[eE][+-]?\d+)?)|((?:'(?:[^']|'')+'|[A-Za-z_][\w.]*)!)?\$?([A-Za-z]{1,3})\$?(\d{1,7})(?![\w(!.])|([A-Z]{3,9})(?=\s*\()|([-+*/(),:]))/iy;
 
 type Token =
   | { readonly kind: 'number'; readonly value: number }
   | { readonly kind: 'cell'; readonly sheet: string; readonly row: number; readonly column: number }
+  | { readonly kind: 'function'; readonly name: string }
   | { readonly kind: 'sign'; readonly text: string };
 
 const LENGTH_MAX = 1000;
 const DEPTH_MAX = 60;
 
 /**
- * The result of a formula that is plain arithmetic: + − * /, brackets and SUM over numbers and cells.
- * Null where it is anything else, or rests on a cell that cannot be read.
+ * The result of a formula that is plain arithmetic: + − * /, brackets and functions that are counted as such
+ * over numbers and cells. Null where it is anything else, or rests on a cell that cannot be read.
  */
-export function evaluate(formula: string, operands: Operands): Operand {
-  const tokens = tokenize(formula);
+export function evaluate(
+  formula: string,
+  operands: Operands,
+  functions: ReadonlySet<string> = PLAIN_FUNCTIONS,
+): Operand {
+  const tokens = tokenize(formula, functions);
   if (!tokens) return null;
   const parser = new Parser(tokens, operands);
   const value = parser.sum();
   return parser.finished ? value : null;
 }
 
-function tokenize(formula: string): Token[] | null {
+function tokenize(formula: string, functions: ReadonlySet<string>): Token[] | null {
   const text = formula.trim().replace(/^=/, '').trimEnd();
   if (text === '' || text.length > LENGTH_MAX) return null;
   const tokens: Token[] = [];
@@ -39,11 +49,14 @@ function tokenize(formula: string): Token[] | null {
   while (TOKEN.lastIndex < text.length) {
     const match = TOKEN.exec(text);
     if (!match) return null;
-    const [, number, sheet, letters, row, sum, sign] = match;
+    const [, number, sheet, letters, row, word, sign] = match;
+    const name = word?.toUpperCase();
+    if (name !== undefined && !functions.has(name)) return null;
     if (number !== undefined) tokens.push({ kind: 'number', value: Number(number) });
     else if (letters !== undefined && row !== undefined)
       tokens.push({ kind: 'cell', sheet: sheetName(sheet), row: Number(row), column: toColumn(letters) });
-    else tokens.push({ kind: 'sign', text: sum ? 'SUM' : (sign ?? '') });
+    else if (name !== undefined) tokens.push({ kind: 'function', name });
+    else tokens.push({ kind: 'sign', text: sign ?? '' });
   }
   return tokens;
 }
@@ -113,7 +126,10 @@ class Parser {
       this.at++;
       return this.operands.cell(token.sheet, token.row, token.column);
     }
-    if (this.take('SUM')) return this.brackets(() => this.listSum());
+    if (token?.kind === 'function') {
+      this.at++;
+      return this.brackets(() => callFunction(token.name, this.arguments(token.name)));
+    }
     return this.brackets(() => this.sum());
   }
 
@@ -124,24 +140,30 @@ class Parser {
     return this.take(')') ? value : this.fail();
   }
 
-  private listSum(): Operand {
-    let total: Operand = 0;
+  /** What stands in a function's brackets; blocks of cells are taken apart where it works on lists. */
+  private arguments(name: string): Operand[] {
+    const values: Operand[] = [];
     do {
-      total = combine(total, this.block() ?? this.sum(), (a, b) => a + b);
+      const block = isOnLists(name) ? this.block() : undefined;
+      if (block === undefined) values.push(this.sum());
+      else if (block !== null && 'error' in block) values.push(block);
+      else if (block !== null) for (const value of block) values.push(value);
+      else values.push(this.fail());
     } while (this.take(','));
-    return total;
+    return values;
   }
 
-  /** A block such as C2:C9; null (and nothing taken) where none stands here. */
-  private block(): Operand {
-    const [from, colon, to] = this.tokens.slice(this.at, this.at + 3);
-    if (from?.kind !== 'cell' || colon?.kind !== 'sign' || colon.text !== ':' || to?.kind !== 'cell')
-      return null;
-    this.at += 3;
+  /** A cell that stands alone, or a block such as C2:C9; undefined (and nothing taken) where none stands here. */
+  private block(): ReturnType<Operands['numbers']> | undefined {
+    const [from, colon, other] = this.tokens.slice(this.at, this.at + 3);
+    if (from?.kind !== 'cell' || colon?.kind !== 'sign') return undefined;
+    const isBlock = colon.text === ':' && other?.kind === 'cell';
+    if (!isBlock && !/^[,)]$/.test(colon.text)) return undefined;
+    const to = isBlock ? other : from;
+    this.at += isBlock ? 3 : 1;
     const [top, bottom] = from.row < to.row ? [from.row, to.row] : [to.row, from.row];
     const [left, right] = from.column < to.column ? [from.column, to.column] : [to.column, from.column];
-    const value = this.operands.sum(from.sheet, top, left, bottom, right);
-    return value ?? this.fail();
+    return this.operands.numbers(from.sheet, top, left, bottom, right);
   }
 
   private take(sign: string): boolean {

@@ -1,6 +1,7 @@
 import { cellAddress, parseAddress } from '@/lib/schedule/cell';
 import { type CellValue, ErrorValue, type Sheet, type SheetRow } from '@/lib/schedule/sheet';
-import { evaluate, type Operand, type Operands } from './arithmetic';
+import { evaluate, type Operands } from './arithmetic';
+import type { Operand } from './arithmetic-functions';
 
 /** A formula without a stored result. */
 interface Pending {
@@ -16,12 +17,12 @@ const VISITS_MAX = 2_000_000;
 
 /**
  * Fills in the results that a file does not keep, where the formula is plain arithmetic on cells that can
- * be read; the others stay empty. Returns the sheets given, rows copied where something was filled in.
+ * be read, or made of the functions given; the others stay empty. Returns the sheets given, rows copied where something was filled in.
  */
-export function fillMissingResults(sheets: readonly Sheet[]): Sheet[] {
+export function fillMissingResults(sheets: readonly Sheet[], functions?: ReadonlySet<string>): Sheet[] {
   const pending = sheets.map(pendingOf);
   if (pending.every((ones) => ones.size === 0)) return [...sheets];
-  const filler = new Filler(sheets, pending);
+  const filler = new Filler(sheets, pending, functions);
   for (const ones of pending) for (const one of ones.values()) filler.settle(one);
   return filler.result();
 }
@@ -44,6 +45,7 @@ class Filler {
   constructor(
     private readonly sheets: readonly Sheet[],
     private readonly pending: readonly Map<string, Pending>[],
+    private readonly functions: ReadonlySet<string> | undefined,
   ) {
     this.rows = sheets.map((sheet) => new Map(sheet.rows.map((row) => [row.number, row])));
     sheets.forEach((sheet, i) => {
@@ -61,7 +63,7 @@ class Filler {
         continue;
       }
       const needs: Pending[] = [];
-      const value = evaluate(one.text, this.operandsFor(one, needs));
+      const value = evaluate(one.text, this.operandsFor(one, needs), this.functions);
       const unsettled = one.state === 'waiting' ? needs.filter(({ state }) => state === 'waiting') : [];
       one.state = 'open';
       if (unsettled.length > 0) {
@@ -105,20 +107,20 @@ class Filler {
         const sheet = find(name);
         return sheet < 0 ? null : toOperand(read(sheet, row, column));
       },
-      sum: (name, top, left, bottom, right) => {
+      numbers: (name, top, left, bottom, right) => {
         const sheet = find(name);
         this.visits += (bottom - top + 1) * (right - left + 1);
         if (sheet < 0 || this.visits > VISITS_MAX) return null;
-        let total = 0;
+        const numbers: number[] = [];
         for (let row = top; row <= bottom; row++) {
           for (let column = left; column <= right; column++) {
             const value = read(sheet, row, column);
             if (value === undefined) return null;
             if (value instanceof ErrorValue) return { error: value.code };
-            if (typeof value === 'number') total += value;
+            if (typeof value === 'number') numbers.push(value);
           }
         }
-        return total;
+        return numbers;
       },
     };
   }

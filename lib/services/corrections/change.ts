@@ -14,6 +14,7 @@ import { readState, type ReadState } from '@/lib/services/schedule/state';
 import { correctedFigures } from '@/lib/services/submissions/figures';
 import { requireSubmission } from '@/lib/services/submissions/require';
 import { datesOf, submissionView } from '@/lib/services/submissions/view';
+import { recalculate } from '@/parsers/workbook';
 import type { Standing } from './standing';
 
 /** What changed cells come to: the list read, audited and computed anew, and what has to be written. */
@@ -37,7 +38,7 @@ export async function workOutChange(
   holding: readonly Holding[],
 ): Promise<Change> {
   const { submission } = standing.row;
-  const corrected = await readState(sheets, submission);
+  const corrected = await readState(recalculate(standing.received, sheets).sheets, submission);
   const reconciliation = reconcile(
     {
       findings: standing.findings,

@@ -7,6 +7,7 @@ import type { ScheduleState } from '@/lib/schedule/weight';
 import type { Sheet } from '@/lib/schedule/sheet';
 import { found } from '@/lib/services/in-office';
 import { readSheets } from '@/parsers';
+import { recalculate } from '@/parsers/workbook';
 import { Lru } from './lru';
 import { proposeState } from './propose';
 import { computed, readState, type Reading, type ReadState } from './state';
@@ -64,8 +65,9 @@ async function makeState(tx: Tx, submission: Submission, state: ScheduleState): 
   if (state === 'corrected') {
     const corrections = await listCorrections(tx, submission.id);
     if (corrections.length === 0) return loadState(tx, submission, 'received');
-    const { sheets } = replay(await receivedSheets(tx, submission), toEvents(corrections));
-    return readState(sheets, how);
+    const received = await receivedSheets(tx, submission);
+    const { sheets } = replay(received, toEvents(corrections));
+    return readState(recalculate(received, sheets).sheets, how);
   }
   const corrected = await loadState(tx, submission, 'corrected');
   if (computed(corrected)) return corrected;

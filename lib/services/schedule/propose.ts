@@ -1,4 +1,5 @@
 import { composeAdoption } from '@/lib/corrections';
+import { recalculate } from '@/parsers/workbook';
 import { blockingOf, readState, type Reading, type ReadState } from './state';
 
 /** Fixing one defect can bring another to light; beyond this many rounds it is left at that. */
@@ -20,7 +21,7 @@ export async function proposeState(
     );
     const { adopted, sheets } = composeAdoption(state.sheets, fixes);
     if (adopted.length === 0) break;
-    state = await readState(sheets, how);
+    state = await readState(recalculate(state.sheets, sheets).sheets, how);
   }
   return state;
 }

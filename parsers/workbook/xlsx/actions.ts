@@ -1,5 +1,5 @@
 import type { CellContent } from '@/lib/schedule/sheet';
-import { columnLetters } from '@/lib/schedule/cell';
+import { cellAddress, columnLetters } from '@/lib/schedule/cell';
 import type { ChangedCell } from '../types';
 import { type Area, cellCount, covers } from './areas';
 import type { FormulaCell } from './formulas';
@@ -12,6 +12,8 @@ export interface CellAction {
   readonly formula?: string | null;
   /** Its stored result goes: it is to be computed when the file is opened. */
   readonly dropResult?: boolean;
+  /** What its formula comes to now, in place of the stored result. */
+  readonly result?: number;
 }
 
 export type SheetActions = Map<number, Map<number, CellAction>>;
@@ -32,6 +34,7 @@ export function planSheet(
   cells: readonly ChangedCell[],
   formulas: readonly FormulaCell[],
   stale: ReadonlySet<FormulaCell>,
+  results: ReadonlyMap<string, number> = new Map(),
 ): Planned {
   const actions: SheetActions = new Map();
   const remarks: string[] = [];
@@ -63,6 +66,11 @@ export function planSheet(
     if (isSet(row, column)) continue;
     if (expanded.has(group) && kind === 'shared') act(row, column, { formula: formula.text });
     if (!stale.has(formula)) continue;
+    const result = several ? undefined : results.get(cellAddress({ row, column }));
+    if (result !== undefined) {
+      act(row, column, { result });
+      continue;
+    }
     dropped += 1;
     for (let r = area.top; r <= area.bottom; r += 1)
       for (let c = area.left; c <= area.right; c += 1) act(r, c, { dropResult: true });

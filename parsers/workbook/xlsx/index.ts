@@ -1,5 +1,6 @@
 import { LIMITS } from '@/parsers/limits';
 import { allChanges, changesByCell, noteText } from '../changes';
+import type { Results } from '../recalculate';
 import type { ChangedCell, ListedChange, Patched } from '../types';
 import { planSheet } from './actions';
 import { changesSheet, freeSheetName } from './changes-sheet';
@@ -62,6 +63,7 @@ export function patchXlsx(
   bytes: Uint8Array,
   cells: readonly ChangedCell[],
   changes: readonly ListedChange[],
+  results: Results = new Map(),
 ): Patched {
   const pack = new EditablePackage(bytes);
   const workbook = openWorkbook(pack);
@@ -75,7 +77,13 @@ export function patchXlsx(
   let waiting = 0;
 
   for (const sheet of sheets) {
-    const plan = planSheet(sheet.name, sheet.cells, sheet.formulas, stale.get(sheet.name) ?? new Set());
+    const plan = planSheet(
+      sheet.name,
+      sheet.cells,
+      sheet.formulas,
+      stale.get(sheet.name) ?? new Set(),
+      results.get(sheet.name),
+    );
     remarks.push(...plan.remarks);
     waiting += plan.stale;
     if (plan.actions.size === 0) continue;
@@ -108,8 +116,8 @@ export function patchXlsx(
 
 function calculationRemark(count: number): string {
   return count === 1
-    ? 'One formula depends on what was corrected; its result is calculated when the workbook is opened.'
-    : `${count} formulas depend on what was corrected; their results are calculated when the workbook is opened.`;
+    ? 'One formula rests on what was corrected and could not be worked out here; its result is calculated when the workbook is opened.'
+    : `${count} formulas rest on what was corrected and could not be worked out here; their results are calculated when the workbook is opened.`;
 }
 
 function threadRemark(sheet: string, cells: readonly string[]): string {

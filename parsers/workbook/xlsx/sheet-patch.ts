@@ -66,7 +66,8 @@ function changeCell(
     return [{ start: cell.start, end: cell.end, text: cellMarkup(prefix, address, style, action.set.to) }];
   }
   let open = xml.slice(cell.start, cell.inner);
-  if (action.dropResult) open = withoutAttribute(open, 't');
+  const isRenewed = action.result !== undefined;
+  if (action.dropResult || isRenewed) open = withoutAttribute(open, 't');
   if (action.formula === null) open = withoutAttribute(open, 'cm');
   const splices: Splice[] = [{ start: cell.start, end: cell.inner, text: open }];
   const replace = (element: Element | null, text: string) => {
@@ -76,7 +77,12 @@ function changeCell(
   else if (action.formula !== undefined) {
     replace(findIn(sheet, cell, 'f'), toBytes(`<${prefix}f>${escapeText(action.formula)}</${prefix}f>`));
   }
-  if (action.dropResult) replace(findIn(sheet, cell, 'v'), '');
+  if (action.dropResult || isRenewed) replace(findIn(sheet, cell, 'v'), '');
+  if (isRenewed) {
+    // In the order the schema asks for: the formula, then its result.
+    const end = findIn(sheet, cell, 'f')?.end ?? cell.innerEnd;
+    splices.push({ start: end, end, text: `<${prefix}v>${action.result}</${prefix}v>` });
+  }
   return splices;
 }
 
