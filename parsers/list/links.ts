@@ -60,8 +60,9 @@ function linkCell(
 ) {
   const cell = cells.ref(row, gives);
   const value = cells.value(row, gives);
-  if (!cell || value === null) return null;
-  const text = cells.rawText(row, gives);
+  const pending = cells.pendingFormula(row, gives);
+  if (!cell || (value === null && pending === null)) return null;
+  const text = pending ?? cells.rawText(row, gives);
   const error = cells.error(row, gives);
   const { items, separator } =
     error === null ? readCell(cells, row, gives, text, context) : { items: [], separator: null };
@@ -99,11 +100,12 @@ function readCell(
   context: LinkContext,
 ): CellLinks {
   const value = cells.value(row, gives);
-  if (typeof value !== 'number') return readLinks(text, context);
   const one = (item: Omit<CellItem, 'text' | 'stated'>): CellLinks => ({
     items: [{ text, stated: false, ...item }],
     separator: null,
   });
+  if (cells.pendingFormula(row, gives) !== null) return one({ link: null, readings: [] });
+  if (typeof value !== 'number') return readLinks(text, context);
   const known = context.ids.find(text) ?? context.ids.find(String(value));
   if (known !== null) return one({ link: { id: known, type: 'FS', lag: 0 }, readings: [] });
   if (formatKind(cells.format(row, gives)) === 'date') return one({ link: null, readings: [] });

@@ -37,7 +37,9 @@ const USED: readonly Field[] = [
 
 export function factsOf(row: SheetRow, cells: SheetCells, estimates: EstimateReader): RowFacts {
   const three = estimates.read(row);
-  const parts = TIES.map((field) => cells.error(row, field) ?? cells.text(row, field));
+  const parts = TIES.map(
+    (field) => cells.error(row, field) ?? cells.pendingFormula(row, field) ?? cells.text(row, field),
+  );
   const [predecessors = '', successors = '', relation = '', lag = ''] = parts;
   return {
     row,

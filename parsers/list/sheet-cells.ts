@@ -71,14 +71,20 @@ export class SheetCells {
     return this.sheet.formulas.get(cellAddress({ row: row.number, column })) ?? null;
   }
 
+  /** A formula as `=A2`, where the file keeps no result for it and it could not be worked out; else null. */
+  pendingFormula(row: SheetRow, field: Field): string | null {
+    if (this.value(row, field) !== null) return null;
+    const formula = this.formula(row, field);
+    return formula && !formula.hasResult ? `=${formula.text}` : null;
+  }
+
   durationCell(row: SheetRow, field: Field): DurationCell {
     const value = this.value(row, field);
-    const formula = value === null ? this.formula(row, field) : null;
     return {
       value,
       format: typeof value === 'number' ? this.format(row, field) : this.general,
       date1904: this.sheet.date1904,
-      formula: formula && !formula.hasResult ? formula.text : null,
+      formula: this.pendingFormula(row, field)?.slice(1) ?? null,
     };
   }
 

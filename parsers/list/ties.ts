@@ -35,14 +35,15 @@ export class TieReader {
   /** An entry that states a relation or lag itself keeps it. */
   apply(items: readonly CellItem[], row: SheetRow): LinkItem[] {
     if (!this.used || items.length === 0) return items.map(plain);
-    const relations = this.shares(this.cells.rawText(row, 'relation'), items.length);
+    const relation = this.cells.pendingFormula(row, 'relation') ?? this.cells.rawText(row, 'relation');
+    const relations = this.shares(relation, items.length);
     const lags = this.lagShares(row, items.length);
     return items.map((item, i) => {
       if (item.stated || !item.link) return plain(item);
-      const [relation = '', lag = ''] = [relations[i], lags?.[i]];
-      const tie = this.read(relation, lag, row, lags === null);
+      const [own = '', lag = ''] = [relations[i], lags?.[i]];
+      const tie = this.read(own, lag, row, lags === null);
       if (tie) return plain({ ...item, link: { ...item.link, ...tie } });
-      const text = [item.text, relation, lags === null ? this.cells.text(row, 'lag') : lag]
+      const text = [item.text, own, lags === null ? this.cells.text(row, 'lag') : lag]
         .filter((part) => part !== '')
         .join(' ');
       return { text, link: null, readings: [] };

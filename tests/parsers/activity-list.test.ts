@@ -287,6 +287,22 @@ describe('links', () => {
     expect(links(list)).toEqual(['1>5 FS 0', '2.5>7 FS 0 ?']);
   });
 
+  it('cannot be read where a formula has no result; they are never dropped', () => {
+    const formulas = new Map([
+      ['F3', { text: 'A2', hasResult: false }],
+      ['F4', { text: 'A2&", "&A3', hasResult: false }],
+    ]);
+    const sheet = drawn(`${HEAD}\nA|Dig|1|2|3|\nB|Pour|1|2|3|\nC|Cure|1|2|3|`, { formulas });
+    const list = read(sheet);
+    expect(
+      list.linkCells.map(({ cell, items }) => [cell.row, items.map(({ text, link }) => [text, link])]),
+    ).toEqual([
+      [3, [['=A2', null]]],
+      [4, [['=A2&", "&A3', null]]],
+    ]);
+    expect(list.links).toEqual([]);
+  });
+
   it('to headings are kept, and lead nowhere', () => {
     const list = read(`${HEAD}\nH1|Civil works||||\nA|Dig|1|2|3|\nB|Pour|1|2|3|H1 SS+2`);
     expect(list.links).toMatchObject([{ from: 'H1', fromIndex: -1, type: 'SS', lag: 2 }]);
