@@ -3,6 +3,7 @@ import type { MatchingForm } from '@/lib/contract/intake';
 import type { Matching } from '@/lib/schedule/field';
 import type { Sheet } from '@/lib/schedule/sheet';
 import { matchingFrom, UnmatchedColumns } from '@/parsers';
+import { refusing } from './upload';
 import { intakeViewOf } from './view';
 
 /** How the list is read: as told by the sender, else as detected; refused, with what was detected, where neither does. */
@@ -11,9 +12,8 @@ export function settleMatching(sheets: readonly Sheet[], wanted: MatchingForm): 
     return matchingFrom(wanted, sheets);
   } catch (error) {
     if (!(error instanceof UnmatchedColumns)) throw error;
-    throw new Invalid(error.message, {
-      errors: error.errors,
-      members: { ...intakeViewOf(sheets, error.detection) },
-    });
+    // A list of too many rows cannot be shown as it will be read, and is refused for that.
+    const members = refusing(() => ({ ...intakeViewOf(sheets, error.detection) }));
+    throw new Invalid(error.message, { errors: error.errors, members });
   }
 }

@@ -263,6 +263,11 @@ describe('a file that is refused', () => {
     ['is a broken workbook', () => new File([zip], 'list.xlsx'), 422],
     ['is an old binary workbook', () => new File([compound], 'list.xls'), 422],
     ['has no column that could be an ID', () => csv(['Colour,Weather', 'red,rain', 'blue,sun']), 422],
+    [
+      'has more than 200 000 rows',
+      () => csv(['ID,Duration', ...Array.from({ length: 200_001 }, (_, i) => `${i + 1},1`)]),
+      422,
+    ],
     ['is over 20 MB', () => new File([new Uint8Array(20 * 1024 * 1024 + 1).fill(65)], 'list.csv'), 413],
   ])('because it %s leaves nothing behind', async (_name, file, status) => {
     const before = await countRows();
