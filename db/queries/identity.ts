@@ -1,4 +1,5 @@
-import { and, eq, gt, isNull, lt, or, sql } from 'drizzle-orm';
+import { and, eq, gt, isNull, lt, ne, notExists, or, sql } from 'drizzle-orm';
+import { alias } from 'drizzle-orm/pg-core';
 import type { Tx } from '../client';
 import { apiTokens, invitations, memberships, offices, users } from '../schema';
 
@@ -97,8 +98,19 @@ export async function findInvitation(tx: Tx, tokenHash: string) {
       memberships,
       and(eq(memberships.officeId, invitations.officeId), eq(memberships.userId, invitations.userId)),
     )
-    .where(and(usable(tokenHash), isNull(memberships.disabledAt)));
+    .where(and(usable(tokenHash), isNull(memberships.disabledAt), belongsNowhereElse(tx)));
   return row ?? null;
+}
+
+/** Since it was made the person may have joined another office, where whoever sets the password is them too. */
+function belongsNowhereElse(tx: Tx) {
+  const elsewhere = alias(memberships, 'elsewhere');
+  return notExists(
+    tx
+      .select({ id: elsewhere.id })
+      .from(elsewhere)
+      .where(and(eq(elsewhere.userId, invitations.userId), ne(elsewhere.officeId, invitations.officeId))),
+  );
 }
 
 /** Uses the invitation up; null where it was used, replaced or expired already. Of two at once one succeeds. */

@@ -1,4 +1,5 @@
 import { withIdentity } from '@/db/scope';
+import { storableText } from '@/db/storable';
 import * as identity from '@/db/queries/identity';
 import { NotFound, Unauthorised } from '@/lib/contract/errors';
 import type { Role } from '@/lib/contract/shared';
@@ -33,7 +34,7 @@ export async function officeContext(headers: Headers, slug: string): Promise<Off
   }
   const session = await readSession(headers);
   if (!session) throw signIn();
-  const found = await withIdentity((tx) => identity.findPersonIn(tx, session.user, slug));
+  const found = await withIdentity((tx) => identity.findPersonIn(tx, session.user, storableText(slug)));
   if (!found || found.person.sessionEpoch !== session.epoch) throw signIn();
   if (!found.member || !found.office) throw noOffice(slug);
   return contextOf(found.person, found.member, found.office, { via: 'session', readOnly: false });

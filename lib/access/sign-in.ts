@@ -2,6 +2,7 @@ import type { NextAuthOptions } from 'next-auth';
 import CredentialsProvider from 'next-auth/providers/credentials';
 import { findCredentials } from '@/db/queries/identity';
 import { withIdentity } from '@/db/scope';
+import { storableText } from '@/db/storable';
 import { passwordMatches } from './password';
 import { authSecret } from './session';
 import { createThrottle } from './throttle';
@@ -18,18 +19,21 @@ export interface SignedIn {
   readonly epoch: number;
 }
 
-/** Throws with the sentence to show; which of the two was wrong is not told. */
+/** Refused, with the sentence to show. Whatever else fails is nobody's business but the log's. */
+class SignInRefused extends Error {}
+
+/** Which of the two was wrong is not told. Throws `SignInRefused`. */
 export async function signIn(email: string, password: string, address: string): Promise<SignedIn> {
-  const account = email.trim().toLowerCase();
+  const account = storableText(email).trim().toLowerCase();
   const wait = Math.max(byEmail.wait(account), address === '' ? 0 : byAddress.wait(address));
   if (wait > 0) {
-    throw new Error(`Too many attempts failed. Try again in ${minutes(wait)}.`);
+    throw new SignInRefused(`Too many attempts failed. Try again in ${minutes(wait)}.`);
   }
   const person = await withIdentity((tx) => findCredentials(tx, account));
   if (!(await passwordMatches(person?.passwordHash ?? null, password)) || !person) {
     byEmail.failed(account);
     byAddress.failed(address);
-    throw new Error('This e-mail address and password do not belong together.');
+    throw new SignInRefused('This e-mail address and password do not belong together.');
   }
   byEmail.succeeded(account);
   return { id: person.id, name: person.name, email: person.email, epoch: person.sessionEpoch };
@@ -40,18 +44,27 @@ function minutes(ms: number): string {
   return count === 1 ? 'a minute' : `${count} minutes`;
 }
 
-/** Made when it is asked for: a build has no secret. */
-export function authOptions(): NextAuthOptions {
+/** Made when it is asked for: a build has no secret. `report` is told what nobody foresaw. */
+export function authOptions(report: (error: unknown) => void): NextAuthOptions {
   return {
     secret: authSecret(),
     session: { strategy: 'jwt', maxAge: 7 * 24 * 60 * 60 },
-    pages: { signIn: '/sign-in', error: '/sign-in' },
+    pages: { signIn: '/sign-in', signOut: '/sign-in', error: '/sign-in' },
     providers: [
       CredentialsProvider({
         name: 'Password',
         credentials: { email: { type: 'email' }, password: { type: 'password' } },
         authorize: (sent, request) =>
-          signIn(sent?.email ?? '', (sent?.password ?? '').slice(0, 1000), addressOf(request.headers)),
+          signIn(
+            (sent?.email ?? '').slice(0, 1000),
+            (sent?.password ?? '').slice(0, 1000),
+            addressOf(request.headers),
+          ).catch((error: unknown) => {
+            if (error instanceof SignInRefused) throw error;
+            report(error);
+            // next-auth puts the sentence into an address: nothing of a failed query may get there.
+            throw new SignInRefused('Signing in does not work at the moment. Try again in a minute.');
+          }),
       }),
     ],
     callbacks: {

@@ -100,9 +100,25 @@ function plainly(issue: z.core.$ZodRawIssue): string | undefined {
       return `This must be one of ${issue.values.map(String).join(', ')}.`;
     case 'invalid_format':
       return issue.format === 'uuid' ? 'This is no id.' : undefined;
+    case 'too_small':
+      return bounded('at least', 'more than', issue.origin, issue.minimum, issue.inclusive ?? true);
+    case 'too_big':
+      return bounded('at most', 'less than', issue.origin, issue.maximum, issue.inclusive ?? true);
     default:
       return undefined;
   }
+}
+
+function bounded(
+  inclusive: string,
+  exclusive: string,
+  origin: string,
+  limit: number | bigint,
+  isInclusive: boolean,
+): string {
+  const many = `${isInclusive ? inclusive : exclusive} ${limit}`;
+  if (origin === 'string') return `This must have ${many} characters.`;
+  return origin === 'array' ? `This must hold ${many}.` : `This must be ${many}.`;
 }
 
 const KINDS: Readonly<Record<string, string>> = {

@@ -52,7 +52,7 @@ export type IntakeView = z.infer<typeof intakeView>;
 
 /** The form fields beside `file`, for POST /intake and POST …/submissions alike. */
 export const matchingForm = z.object({
-  sheet: z.array(z.string()).optional(),
+  sheet: z.array(z.string()).max(1000).optional(),
   /** { field: column index }. */
   columns: z.record(z.string(), z.int().min(0)).optional(),
   headerRow: z.int().min(0).optional(),

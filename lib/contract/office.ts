@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { isoDate, role, uuid } from './shared';
+import { isoDate, nameOf, role, uuid } from './shared';
 
 /** GET /api/offices/{office}: the office and who is asking. */
 export const officeView = z.object({
@@ -30,7 +30,7 @@ export type MeView = z.infer<typeof meView>;
 export const contractorView = z.object({ id: uuid, name: z.string(), projects: z.int() });
 export type ContractorView = z.infer<typeof contractorView>;
 export const contractorCreate = z.object({
-  name: z.string().trim().min(1, 'Give the contractor a name.').max(120, 'Use at most 120 characters.'),
+  name: nameOf('Give the contractor a name.', 120),
 });
 
 /** GET /members, POST /members. */
@@ -48,7 +48,7 @@ export const memberView = z.object({
 export type MemberView = z.infer<typeof memberView>;
 export const memberCreate = z
   .object({
-    name: z.string().trim().min(1, 'Give the person a name.').max(120, 'Use at most 120 characters.'),
+    name: nameOf('Give the person a name.', 120),
     email: z.email('This is no e-mail address.').max(254),
     role,
     contractor: uuid.nullable().optional(),

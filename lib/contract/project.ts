@@ -1,11 +1,11 @@
 import { z } from 'zod';
 import { calendar } from './office';
-import { isoDate, unit, uuid } from './shared';
+import { isoDate, nameOf, unit, uuid } from './shared';
 import { figures, submissionStatus } from './submission';
 
 export const projectCreate = z.object({
-  code: z.string().trim().min(1, 'Give the project a code.').max(40, 'Use at most 40 characters.'),
-  name: z.string().trim().min(1, 'Give the project a name.').max(160, 'Use at most 160 characters.'),
+  code: nameOf('Give the project a code.', 40),
+  name: nameOf('Give the project a name.', 160),
   contractor: z.uuid('Choose the contractor.'),
   start: isoDate,
   targetFinish: isoDate.nullable().optional(),
@@ -13,7 +13,7 @@ export const projectCreate = z.object({
   unit: unit.nullable().optional(),
   hoursPerDay: z
     .number('Give the hours as a number.')
-    .positive('A working day has more than 0 hours.')
+    .min(0.1, 'A working day has more than 0 hours.')
     .max(24, 'A day has at most 24 hours.')
     .optional(),
   calendar: calendar.optional(),

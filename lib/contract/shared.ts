@@ -2,8 +2,24 @@ import { z } from 'zod';
 
 /** Shapes that several entities use. */
 export const uuid = z.uuid();
-/** A calendar date, YYYY-MM-DD. */
-export const isoDate = z.iso.date('Write a date as 2027-03-12.');
+/** A calendar date, YYYY-MM-DD, from the year 1 on. */
+export const isoDate = z.iso
+  .date('Write a date as 2027-03-12.')
+  .refine((date) => !date.startsWith('0000'), 'There is no year 0.');
+// Control characters, and those that turn the direction of what is written after them.
+const UNSEEN = /[\p{Cc}\u202A-\u202E\u2066-\u2069]/gu;
+/** A name of one line: what could not be seen in it is left out, and so are the blanks around it. */
+export const nameOf = (missing: string, most: number) =>
+  z
+    .string()
+    .overwrite((text) =>
+      text
+        .replace(UNSEEN, '')
+        .replace(/\p{Surrogate}/gu, '\uFFFD')
+        .trim(),
+    )
+    .min(1, missing)
+    .max(most, `Use at most ${most} characters.`);
 export const unit = z.enum(['day', 'hour', 'week']);
 export const scheduleState = z.enum(['received', 'corrected', 'proposed']);
 export const weight = z.enum(['blocks', 'distorts', 'query']);

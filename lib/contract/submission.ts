@@ -245,7 +245,7 @@ export const commentCreate = z.object({
   finding: uuid.nullable().optional(),
   /** A sheet's row, where it is not about a finding. */
   sheet: z.string().nullable().optional(),
-  row: z.int().min(1).nullable().optional(),
+  row: z.int().min(1).max(1_048_576).nullable().optional(),
   /** Inside the office, or shared with the contractor. A scheduler's are always shared. */
   audience: z.enum(['inside', 'shared']).default('inside'),
 });

@@ -13,7 +13,7 @@ export function problemResponse(error: unknown, request: Request): Response {
   }
   const id = crypto.randomUUID();
   log.error(
-    { id, err: error, method: request.method, url: new URL(request.url).pathname },
+    { id, err: error, method: request.method, url: withoutSecret(new URL(request.url).pathname) },
     'unexpected error',
   );
   return problem(500, {
@@ -21,6 +21,11 @@ export function problemResponse(error: unknown, request: Request): Response {
     detail: `Nothing was changed. Quote ${id} when you report it.`,
     instance: `urn:uuid:${id}`,
   });
+}
+
+/** An invitation's path is a secret. */
+function withoutSecret(path: string): string {
+  return path.replace(/(\/invitations\/).+/, '$1…');
 }
 
 function problem(status: number, members: object, headers: Readonly<Record<string, string>> = {}): Response {

@@ -134,6 +134,22 @@ describe('an invitation', () => {
     ).toEqual([]);
   });
 
+  it('stops working once the person belongs to another office as well', async () => {
+    const { link, member } = await json<InvitationView>(
+      await add({ name: 'Wanderer', email: 'wanderer@cast.example', role: 'reviewer' }),
+    );
+    expect((await accept(link)).status).toBe(204);
+    const again = await ask('POST', `${members}/${member.id}/invitation`, asAdministrator());
+    const { link: reset } = await json<InvitationView>(again);
+    expect((await look(reset)).status).toBe(200);
+    await database.asOwner(
+      `insert into memberships (office_id, user_id, role)
+       select o.id, m.user_id, 'reviewer' from offices o, memberships m where o.slug <> $1 and m.id = $2`,
+      [SLUG, member.id],
+    );
+    expect([(await look(reset)).status, (await accept(reset)).status]).toEqual([404, 404]);
+  });
+
   it('waits where another office’s is still open', async () => {
     const other = await database.asOwner<{ id: string }>(`select id from offices where slug <> $1`, [SLUG]);
     await withOwner((tx) => addPlayer(tx, other[0]?.id ?? '', 'reviewer', 'pending'));
