@@ -11,7 +11,7 @@ export interface BenchRow {
   readonly ratio?: { readonly to: string; readonly times: number };
 }
 
-const REPEATS = 3;
+export const REPEATS = 3;
 
 /** Runs it three times and gives the median; what is left over from before is collected first. */
 export async function measure(

@@ -20,7 +20,7 @@ import { storeList } from '@/lib/services/submissions/store';
 import { DEFAULT_READING } from '@/lib/schedule/activity-list';
 import { detectMatching, readSheets } from '@/parsers';
 import { syntheticList, toXlsx, type ListRow } from '@/tests/support/lists';
-import { measure, type BenchRow } from './measure';
+import { measure, REPEATS, type BenchRow } from './measure';
 
 /** A defect on every tenth row: estimates out of order, or a predecessor that does not exist. */
 function withDefects(rows: readonly ListRow[]): ListRow[] {
@@ -75,7 +75,9 @@ async function insertOf(ctx: OfficeContext, contractorId: string, projectId: str
   const sheets = readSheets(bytes, 'list.xlsx');
   const how = { matching: detectMatching(sheets).matching, reading: DEFAULT_READING };
   const state = await readState(sheets, how);
-  const audit = firstFindings(draftFindings(state));
+  const drafts = draftFindings(state);
+  // Each run inserts findings with ids of their own, made beforehand.
+  const audits = Array.from({ length: REPEATS }, () => firstFindings(drafts));
   const project = await inOffice(ctx, (tx) => findProject(tx, projectId));
   if (!project) throw new Error('The bench lost its project.');
   const dates = datesOfProject(project);
@@ -102,7 +104,7 @@ async function insertOf(ctx: OfficeContext, contractorId: string, projectId: str
         receivedBy: ctx.user.id,
       };
       await insertSubmission(tx, storable(values), bytes);
-      await storeList(tx, ctx, id, state.list, audit);
+      await storeList(tx, ctx, id, state.list, audits.pop() ?? firstFindings(drafts));
     });
 }
 
