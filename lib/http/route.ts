@@ -27,7 +27,7 @@ interface Options {
 }
 
 interface NextParams {
-  readonly params: Promise<Readonly<Record<string, string>>>;
+  readonly params: Promise<Readonly<Record<string, string | string[]>>>;
 }
 
 type Handler = (request: Request, next: NextParams) => Promise<Response>;
@@ -58,7 +58,7 @@ function handler<Who>(
   return async (request, { params }) => {
     const arrived = new Date();
     try {
-      const path = await params;
+      const path = flat(await params);
       const who = await identify(request.headers, path);
       if (bearerToken(request.headers) === null) requireSameOrigin(request);
       const call = await read(request, path, arrived, options);
@@ -67,6 +67,13 @@ function handler<Who>(
       return problemResponse(error, request);
     }
   };
+}
+
+/** A parameter that takes several segments is given as they stand in the address. */
+function flat(params: Awaited<NextParams['params']>): Call['path'] {
+  return Object.fromEntries(
+    Object.entries(params).map(([name, value]) => [name, typeof value === 'string' ? value : value.join('/')]),
+  );
 }
 
 async function read(
