@@ -66,7 +66,7 @@ module.exports = {
     ),
     never(
       'only-set-up-is-owner',
-      { pathNot: '^(db/(owner|seed/)|lib/commands/)' },
+      { pathNot: '^(db/(owner|seed/)|lib/commands/|tests/)' },
       { path: '^db/owner\\.ts$' },
     ),
 
