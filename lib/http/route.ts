@@ -72,7 +72,10 @@ function handler<Who>(
 /** A parameter that takes several segments is given as they stand in the address. */
 function flat(params: Awaited<NextParams['params']>): Call['path'] {
   return Object.fromEntries(
-    Object.entries(params).map(([name, value]) => [name, typeof value === 'string' ? value : value.join('/')]),
+    Object.entries(params).map(([name, value]) => [
+      name,
+      typeof value === 'string' ? value : value.join('/'),
+    ]),
   );
 }
 
