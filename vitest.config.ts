@@ -14,6 +14,9 @@ export default defineConfig({
           include: ['tests/**/*.test.{ts,tsx}'],
           exclude: [...everywhere, '**/*.db.test.ts'],
           environment: 'node',
+          // What is pure leaves nothing behind for the next file: one set of modules a thread is twice as fast.
+          pool: 'threads',
+          isolate: false,
           testTimeout: 30_000,
         },
       },

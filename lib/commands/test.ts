@@ -73,7 +73,7 @@ async function runVitest(
     PLUMBROW_TEST_OWNER_URL: cluster.ownerUrl('postgres'),
     PLUMBROW_TEST_SERVER_URL: cluster.serverUrl('postgres'),
   };
-  const reporters = ['--reporter=dot', '--reporter=json', `--outputFile.json=${report}`];
+  const reporters = ['--reporter=default', '--reporter=json', `--outputFile.json=${report}`];
   const projects = cluster ? [] : ['--project=pure'];
   const code = await runProgram(ending, 'vitest', ['run', ...reporters, ...projects, ...args], {
     env: { ...urls, NODE_ENV: 'test' },
