@@ -75,3 +75,8 @@ export const calendar = z.object({
   holidays: z.array(isoDate).max(2000),
 });
 export type CalendarView = z.infer<typeof calendar>;
+/** A calendar as sent: what is left out is Monday to Friday, and no holidays. */
+export const calendarGiven = z.object({
+  workingDays: calendar.shape.workingDays.default([1, 2, 3, 4, 5]),
+  holidays: calendar.shape.holidays.default([]),
+});

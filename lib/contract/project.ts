@@ -1,6 +1,6 @@
 import { z } from 'zod';
-import { calendar } from './office';
-import { isoDate, nameOf, unit, uuid } from './shared';
+import { calendar, calendarGiven } from './office';
+import { isoDate, nameOf, unit, unitGiven, uuid } from './shared';
 import { figures, submissionStatus } from './submission';
 
 export const projectCreate = z.object({
@@ -10,13 +10,13 @@ export const projectCreate = z.object({
   start: isoDate,
   targetFinish: isoDate.nullable().optional(),
   /** What a duration without a unit means; absent: not settled, working days are assumed. */
-  unit: unit.nullable().optional(),
+  unit: unitGiven.nullable().optional(),
   hoursPerDay: z
     .number('Give the hours as a number.')
     .min(0.1, 'A working day has more than 0 hours.')
     .max(24, 'A day has at most 24 hours.')
     .optional(),
-  calendar: calendar.optional(),
+  calendar: calendarGiven.optional(),
 });
 export const projectUpdate = projectCreate.omit({ contractor: true }).partial();
 

@@ -21,6 +21,12 @@ export const nameOf = (missing: string, most: number) =>
     .min(1, missing)
     .max(most, `Use at most ${most} characters.`);
 export const unit = z.enum(['day', 'hour', 'week']);
+const UNIT_WORDS = ['day', 'hour', 'week', 'days', 'hours', 'weeks', 'working day', 'working days'] as const;
+/** A unit as sent, in the singular or the plural. */
+export const unitGiven = z
+  .enum(UNIT_WORDS, 'This must be one of day, hour, week.')
+  .transform((word) => (word.includes('day') ? 'day' : word.startsWith('hour') ? 'hour' : 'week'))
+  .pipe(unit);
 export const scheduleState = z.enum(['received', 'corrected', 'proposed']);
 export const weight = z.enum(['blocks', 'distorts', 'query']);
 export const ROLES = ['administrator', 'analyst', 'reviewer', 'scheduler'] as const;

@@ -220,11 +220,12 @@ export const analysisView = z.discriminatedUnion('computable', [
 ]);
 export type AnalysisView = z.infer<typeof analysisView>;
 
+const BETWEEN = 'Give a confidence between 0 and 1, such as 0.8.';
 export const chanceQuery = z.object({
   state: scheduleState.default('corrected'),
   days: z.coerce.number().optional(),
   date: isoDate.optional(),
-  confidence: z.coerce.number().gt(0).lt(1).optional(),
+  confidence: z.coerce.number().gt(0, BETWEEN).lt(1, BETWEEN).optional(),
 });
 export const chanceView = z.object({
   days: z.number(),

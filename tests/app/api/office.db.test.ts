@@ -181,6 +181,16 @@ describe('a project', () => {
     });
   });
 
+  it('takes a unit in the plural, and a calendar that gives only its holidays', async () => {
+    const calendar = { holidays: ['2027-04-02'] };
+    const answer = await create({ ...good(), code: 'BOW-2', unit: 'weeks', calendar });
+    expect(answer.status).toBe(201);
+    expect(await json<ProjectView>(answer)).toMatchObject({
+      unit: 'week',
+      calendar: { workingDays: [1, 2, 3, 4, 5], holidays: ['2027-04-02'] },
+    });
+  });
+
   it('needs a code of its own', async () => {
     const answer = await create(good());
     expect(answer.status).toBe(409);
