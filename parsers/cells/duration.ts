@@ -65,7 +65,8 @@ function readNumeric(value: number, { format, date1904 }: DurationCell, context:
   const text = asShown(value, format, date1904);
   const kind = formatKind(format);
   if (kind === 'elapsed' || kind === 'time') {
-    return done(value * 24 * daysIn('hour', context.options), text, 'hour');
+    const hours = value * 24;
+    return done(hours * daysIn('hour', context.options), `${Number(hours.toPrecision(12))} h`, 'hour');
   }
   if (kind === 'date') return fail('unreadable', text, value < SMALL_SERIAL ? [value] : []);
   if (kind === 'percent') return fail('unreadable', text);

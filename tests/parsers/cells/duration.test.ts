@@ -49,7 +49,7 @@ describe('durations', () => {
     expect(read(16, '0.0', { header })).toMatchObject({ days: 2, unit: 'hour', text: '16.0' });
     expect(read('16', 'General', { header })).toMatchObject({ days: 2, unit: 'hour' });
     expect(read(2, 'General', { unit: 'week' })).toMatchObject({ days: 10, unit: null });
-    expect(read(1 / 3, '[h]:mm')).toMatchObject({ days: 1, unit: 'hour' });
+    expect(read(1 / 3, '[h]:mm')).toMatchObject({ days: 1, unit: 'hour', text: '8 h' });
     expect(
       read(3, 'General', { unit: 'hour', options: { unit: 'hour', hoursPerDay: 10, daysPerWeek: 6 } }).days,
     ).toBeCloseTo(0.3, 12);
