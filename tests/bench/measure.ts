@@ -13,17 +13,19 @@ export interface BenchRow {
 
 export const REPEATS = 3;
 
-/** Runs it three times and gives the median; what is left over from before is collected first. */
+/** Runs it a few times and gives the median; `prepare` runs before each, untimed. */
 export async function measure(
   name: string,
   size: number,
   run: () => unknown,
   repeats = REPEATS,
+  prepare?: () => void,
 ): Promise<BenchRow> {
   const times: number[] = [];
   let peak = 0;
   for (let repeat = 0; repeat < repeats; repeat += 1) {
     globalThis.gc?.();
+    prepare?.();
     const before = process.memoryUsage().rss;
     const started = performance.now();
     await run();
