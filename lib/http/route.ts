@@ -27,7 +27,8 @@ interface Options {
 }
 
 interface NextParams {
-  readonly params: Promise<Readonly<Record<string, string | string[]>>>;
+  /** Where the address has no parameter, the framework gives none. */
+  readonly params: Promise<Readonly<Record<string, string | string[]>> | undefined>;
 }
 
 type Handler = (request: Request, next: NextParams) => Promise<Response>;
@@ -72,7 +73,7 @@ function handler<Who>(
 /** A parameter that takes several segments is given as they stand in the address. */
 function flat(params: Awaited<NextParams['params']>): Call['path'] {
   return Object.fromEntries(
-    Object.entries(params).map(([name, value]) => [
+    Object.entries(params ?? {}).map(([name, value]) => [
       name,
       typeof value === 'string' ? value : value.join('/'),
     ]),

@@ -65,3 +65,22 @@ it('takes a parameter without a value for none', async () => {
   );
   expect(given).toEqual({ a: '1' });
 });
+
+describe('parameters of the address', () => {
+  const seen = async (given: Record<string, string | string[]> | undefined) => {
+    let path: unknown;
+    await openRoute((_who: null, call: { path: object }) => Promise.resolve((path = call.path)))(
+      new Request('http://x.test/api/x'),
+      { params: Promise.resolve(given) },
+    );
+    return path;
+  };
+
+  it('are none where the framework gives none', async () => {
+    expect(await seen(undefined)).toEqual({});
+  });
+
+  it('are given as the address has them, several segments in one', async () => {
+    expect(await seen({ office: 'demo', unknown: ['a', 'b'] })).toEqual({ office: 'demo', unknown: 'a/b' });
+  });
+});
