@@ -1,4 +1,4 @@
-import { expect, it } from 'vitest';
+import { describe, expect, it } from 'vitest';
 import { Conflict, Invalid } from '@/lib/contract/errors';
 import { Download } from '@/lib/contract/transfer';
 import { openRoute } from '@/lib/http/route';
