@@ -3,8 +3,8 @@
 import type { GetRowIdParams, GridApi } from 'ag-grid-community';
 import { AgGridReact } from 'ag-grid-react';
 import { useEffect, useMemo, useState } from 'react';
-import { GRID_MODULES, GRID_WORDS } from '@/components/findings/grid/modules';
-import { gridTheme } from '@/components/findings/grid/theme';
+import { GRID_MODULES, GRID_WORDS } from '@/components/ui/grid-modules';
+import { gridTheme } from '@/components/ui/grid-theme';
 import { useFormat } from '@/components/ui/locale';
 import { useNonce } from '@/components/ui/nonce';
 import type { AnalysedActivity } from '@/lib/contract/submission';

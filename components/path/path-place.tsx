@@ -10,9 +10,7 @@ import { PathViews } from './path-views';
 import { SHOWN, type Shown } from './rows';
 import { StateSwitch } from './state-switch';
 import { usePlace } from './use-place';
-
-export const VIEWS = { drawn: 'Drawn', table: 'Table' } as const;
-export type View = keyof typeof VIEWS;
+import { VIEWS } from './views';
 
 const NEAR = [1, 2, 5, 10, 20];
 

@@ -10,7 +10,7 @@ import { ActivityDetail } from './activity-detail';
 import { ActivityTable } from './activity-table';
 import { Chain } from './chain';
 import { feedersOf } from './feeders';
-import type { View } from './path-place';
+import type { View } from './views';
 import { rowsToDraw, SHOWN, type Shown } from './rows';
 import { TimeChart } from './time-chart';
 import { pathVarianceWorking } from './workings';

@@ -9,8 +9,8 @@ import { useNonce } from '@/components/ui/nonce';
 import type { FindingOrder } from '../order';
 import { columnsOf, HEADER_ORDERS, type ColumnId } from './columns';
 import type { GridContext } from './context';
-import { GRID_MODULES, GRID_WORDS } from './modules';
-import { gridTheme } from './theme';
+import { GRID_MODULES, GRID_WORDS } from '@/components/ui/grid-modules';
+import { gridTheme } from '@/components/ui/grid-theme';
 import { useGridSize } from './use-grid-size';
 
 interface FindingsGridProps {
