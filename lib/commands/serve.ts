@@ -38,11 +38,17 @@ export async function serve(ending: Ending, options: ServeOptions): Promise<{ en
   const healthy = await Promise.race([ended.then(() => false), health(options)]);
   if (!healthy) {
     const said = await readFile(options.logFile, 'utf8').catch(() => '');
-    const end = said.trim().split('\n').slice(-12).join('\n');
+    const end = lastLines(said);
     if (/EADDRINUSE/.test(said)) throw busy(options.port);
     throw new Refusal(`The application did not start; the end of ${options.logFile} says why:\n${end}`);
   }
   return { ended };
+}
+
+/** A few of the last, each cut where a screen's width would be full of one. */
+function lastLines(text: string): string {
+  const lines = text.trim().split('\n').slice(-4);
+  return lines.map((line) => (line.length > 500 ? `${line.slice(0, 500)} …` : line)).join('\n');
 }
 
 /** The served application is never given the way to connect as the owner of the tables. */
