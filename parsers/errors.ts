@@ -9,6 +9,8 @@ export const UNREADABLE = {
   'no-rows': 'No sheet of this workbook holds anything. Check that the right file was chosen.',
   'too-large': 'This file is over 20 MB. Send a workbook that holds only the activity list.',
   'too-many-rows': 'This file has more than 200 000 rows. Send a workbook that holds only the activity list.',
+  'too-many-links':
+    'This list has more than 2 000 000 links. Send a list in which an activity names only what it waits for.',
   'too-many-cells':
     'This file spreads over more cells than can be read. Send a workbook that holds only the activity list.',
   'unpacks-too-large':

@@ -8,6 +8,8 @@ export const LIMITS = {
   rows: 200_000,
   /** Rows a file may have above and around the list. */
   rowsAround: 1_000,
+  /** Entries of all predecessor and successor cells together. */
+  links: 2_000_000,
   /** Columns of a sheet, A to XFD. */
   columns: 16_384,
   /** Places in rows, up to each row's last cell that holds anything. */

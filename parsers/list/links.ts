@@ -6,6 +6,8 @@ import { IdBook } from '@/parsers/cells/id-book';
 import { asShown, formatKind } from '@/parsers/cells/number-format';
 import { type CellItem, type CellLinks, type LinkContext, readLinks, SEPARATOR } from '@/parsers/cells/links';
 import { toContent } from '@/parsers/cells/text';
+import { UnreadableFile } from '@/parsers/errors';
+import { LIMITS } from '@/parsers/limits';
 import type { ReadRow, RowSorter } from './rows';
 import type { SheetCells } from './sheet-cells';
 import { TieReader } from './ties';
@@ -36,6 +38,7 @@ export function readLinkCells(
   const context: LinkContext = { ids: book, unit, options };
   const found: (Omit<LinkCell, 'separator'> & { separator: string | null })[] = [];
   const ties = new Map<SheetCells, TieReader>();
+  let entries = 0;
   for (const read of sorter.rows) {
     if (read.activity < 0) continue;
     const { cells } = read;
@@ -45,7 +48,10 @@ export function readLinkCells(
     const tied: Gives = cells.has('predecessors') ? 'predecessors' : 'successors';
     for (const gives of ['predecessors', 'successors'] as const) {
       const cell = linkCell(read, gives, context, gives === tied ? tie : null);
-      if (cell) found.push(cell);
+      if (!cell) continue;
+      found.push(cell);
+      entries += cell.items.length;
+      if (entries > LIMITS.links) throw new UnreadableFile('too-many-links');
     }
   }
   const usual = usualSeparators(found);

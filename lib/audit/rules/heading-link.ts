@@ -6,6 +6,7 @@ import { wouldLoop } from '../support/graph';
 import { type HeadingEnds, linkedHeadings } from '../support/headings';
 import { linkEdit, withId } from '../support/link-edits';
 import { removeLinks, writtenIn } from '../support/link-fixes';
+import { rewritable } from '../support/rewritable';
 import { GAO_LOGIC } from '../support/sources';
 import { called, capital, joined } from '../support/words';
 
@@ -31,7 +32,7 @@ function replacement(
   const link = list.links[index];
   const { cell, item } = writtenIn(list, link);
   const [first, ...others] = activities.filter(({ id }) => id !== '');
-  if (!link || !cell || !item || !first || activities.length > MOST) return [];
+  if (!link || !cell || !item || !first || activities.length > MOST || !rewritable(list, cell)) return [];
   const entry = (activity: Activity) => withId(cell, item.text, heading, activity.id);
   const which = link.fromIndex < 0 ? 'ends' : 'begins';
   const { type, lag } = link;
@@ -69,14 +70,14 @@ function defectOf(context: AuditContext, index: number, ends: HeadingEnds): Defe
     'Without the link, if the activities under the heading are linked as they should be.',
   );
   const fixes = replacement(context, index, standIns(context, link, ends), id);
-  const [fix, ...alternatives] = [...fixes, removal];
+  const [fix, ...alternatives] = [...fixes, ...(removal ? [removal] : [])];
   return [
     {
       about: `${aboutActivity(list, owner)}|${id}`,
       message: link.fromIndex < 0 ? 'from' : 'to',
       data: { id: called(owner), heading: id, name, row },
       ...at(owner, cell.cell),
-      ...(fixes.length > 0 && fix ? { fix, alternatives } : { alternatives: [removal] }),
+      ...(fixes.length > 0 && fix ? { fix, alternatives } : { alternatives: removal ? [removal] : [] }),
     },
   ];
 }

@@ -45,7 +45,7 @@ function linkWords(list: ActivityList, index: number): string {
   return from && to ? `${called(to)} for ${called(from)}` : '';
 }
 
-function cutFix(context: AuditContext, tangle: Tangle, others: number): Fix {
+function cutFix(context: AuditContext, tangle: Tangle, others: number): Fix | undefined {
   const { cut, cutIsSmallest } = tangle;
   const links = cut.map((index) => linkWords(context.list, index));
   const what = `Without the wait of ${joined(links)} no loop is left`;
@@ -76,8 +76,10 @@ function defectOf(context: AuditContext, tangle: Tangle): Defect {
     },
     ...(owner ? at(owner, cell.cell) : WHOLE_LIST),
     fix: cutFix(context, tangle, others.length),
-    alternatives: others.map((index) =>
-      removeLinks(list, [index], `Without the wait of ${linkWords(list, index)} no loop is left either.`),
+    alternatives: others.flatMap(
+      (index) =>
+        removeLinks(list, [index], `Without the wait of ${linkWords(list, index)} no loop is left either.`) ??
+        [],
     ),
   };
 }

@@ -8,6 +8,7 @@ import { linkEdit, withId } from '../support/link-edits';
 import { removeLinks, writtenIn } from '../support/link-fixes';
 import type { Nearness } from '../support/nearest';
 import { PRACTICE } from '../support/sources';
+import { rewritable } from '../support/rewritable';
 import { endsWith, type UnknownLink, unknownLinks } from '../support/unknown-links';
 import { called, capital, joined, joinedIn } from '../support/words';
 
@@ -33,7 +34,7 @@ const missing = (data: MessageData) => {
 
 function nearFixes(list: ActivityList, unknown: UnknownLink): Fix[] {
   const { cell, item } = writtenIn(list, unknown.link);
-  if (!cell || !item) return [];
+  if (!cell || !item || !rewritable(list, cell)) return [];
   const { near, how, wanted, index, link } = unknown;
   return near.slice(0, OFFERED).map((activity) => {
     const edit: CellEdit = linkEdit(cell, [
@@ -100,10 +101,10 @@ export const rule: Rule = {
       const { owner, wanted, gives, near, unfit, unnamed } = unknown;
       const { cell } = writtenIn(list, unknown.link);
       const removal = removeLinks(list, [unknown.index], removalReason(unknown));
-      const [fix = removal, ...alternatives] = [
+      const [fix, ...alternatives] = [
         ...namingFix(list, unknown),
         ...nearFixes(list, unknown),
-        removal,
+        ...(removal ? [removal] : []),
       ];
       return {
         about: `${aboutActivity(list, owner)}|${wanted}`,

@@ -6,6 +6,7 @@ import { aboutActivity, at } from '../support/about';
 import { wouldLoop } from '../support/graph';
 import { linkEdit } from '../support/link-edits';
 import { type Reading, readingsOf } from '../support/readings';
+import { rewritable } from '../support/rewritable';
 import { PRACTICE } from '../support/sources';
 import { called, capital, joinedIn } from '../support/words';
 
@@ -38,7 +39,9 @@ function defectOf(context: AuditContext, cell: LinkCell, item: LinkItem): Defect
   const { list } = context;
   const owner = list.activities[cell.owner];
   if (!owner) return [];
-  const readings = readingsOf(item, cell.owner, list).filter((reading) => fits(context, cell, reading));
+  const readings = rewritable(list, cell)
+    ? readingsOf(item, cell.owner, list).filter((reading) => fits(context, cell, reading))
+    : [];
   const fixes = readings.map((reading) => readingFix(cell, item, reading, readings.length === 1));
   const [only] = fixes;
   return [

@@ -4,6 +4,7 @@ import { cellAddress } from '@/lib/schedule/cell';
 import type { CellEdit, Fix, ItemChange } from '@/lib/schedule/edit';
 import { linkEdit } from './link-edits';
 import { memo } from './memo';
+import { rewritable } from './rewritable';
 
 /** Empties the relation and the lag of a row whose last entry goes. */
 function withoutTies({ ties = [] }: LinkCell, edit: CellEdit): CellEdit[] {
@@ -52,14 +53,15 @@ function entriesOf(list: ActivityList, index: number): Entry[] {
   return echo ? [{ cell, item }, echo] : [{ cell, item }];
 }
 
-/** Removes links from the cells they are written in, one edit a cell. */
-export function removeLinks(list: ActivityList, links: readonly number[], reason: string): Fix {
+/** Removes links from the cells they are written in, one edit a cell; undefined where such a cell is too long for it. */
+export function removeLinks(list: ActivityList, links: readonly number[], reason: string): Fix | undefined {
   const byCell = new Map<LinkCell, ItemChange[]>();
   for (const { cell, item } of links.flatMap((index) => entriesOf(list, index))) {
     const changes = byCell.get(cell) ?? [];
     changes.push({ op: 'remove', item: item.text });
     byCell.set(cell, changes);
   }
+  if ([...byCell.keys()].some((cell) => !rewritable(list, cell))) return undefined;
   return {
     reason,
     edits: [...byCell].flatMap(([cell, items]) => withoutTies(cell, linkEdit(cell, items))),
@@ -109,7 +111,7 @@ function entryFor(list: ActivityList, owner: Activity, id: string): string {
 export function addLink(list: ActivityList, from: Activity, to: Activity, reason: string): Fix | null {
   const predecessors = cellFor(list, to, 'predecessors');
   const cell = predecessors ?? cellFor(list, from, 'successors');
-  if (!cell || cell.error !== null) return null;
+  if (!cell || cell.error !== null || !rewritable(list, cell)) return null;
   const [owner, other] = predecessors ? [to, from] : [from, to];
   const item = entryFor(list, owner, other.id);
   return {

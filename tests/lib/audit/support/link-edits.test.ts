@@ -55,12 +55,12 @@ describe('linkEdit', () => {
 
 describe('removeLinks', () => {
   it('makes one edit a cell', () => {
-    const { edits, changes } = removeLinks(list('A 1', 'B 1 <- A, C, D', 'E 1 <- A'), [0, 2, 3], 'Because.');
-    expect(edits.map(({ cell: address, to }) => [address, to])).toEqual([
+    const fix = removeLinks(list('A 1', 'B 1 <- A, C, D', 'E 1 <- A'), [0, 2, 3], 'Because.');
+    expect(fix?.edits.map(({ cell: address, to }) => [address, to])).toEqual([
       ['F3', 'C'],
       ['F4', null],
     ]);
-    expect(changes).toHaveLength(3);
+    expect(fix?.changes).toHaveLength(3);
   });
 });
 
