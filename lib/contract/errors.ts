@@ -100,6 +100,8 @@ function plainly(issue: z.core.$ZodRawIssue): string | undefined {
       return `This must be one of ${issue.values.map(String).join(', ')}.`;
     case 'invalid_format':
       return issue.format === 'uuid' ? 'This is no id.' : undefined;
+    case 'invalid_union':
+      return 'This is of another kind than expected.';
     case 'too_small':
       return bounded('at least', 'more than', issue.origin, issue.minimum, issue.inclusive ?? true);
     case 'too_big':

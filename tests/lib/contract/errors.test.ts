@@ -18,6 +18,7 @@ it('says plainly what is wrong where a shape has no sentence of its own', () => 
   expect(sentence(z.number().lt(1), 1)).toBe('This must be less than 1.');
   expect(sentence(z.string().max(3), 'four')).toBe('This must have at most 3 characters.');
   expect(sentence(z.array(z.string()).max(1), ['a', 'b'])).toBe('This must hold at most 1.');
+  expect(sentence(z.union([z.string(), z.null()]), 1)).toBe('This is of another kind than expected.');
   expect(sentence(z.uuid(), 'x')).toBe('This is no id.');
   expect(sentence(z.object({ a: z.number() }), { a: 'x' })).toBe('This must be a number.');
   expect(sentence(z.object({ a: z.string(), b: z.string() }), {})).toBe('2 fields are not as they must be.');
