@@ -19,8 +19,10 @@ export interface Base {
   readonly lateStart: Float64Array;
   /** The largest variance of a longest path from each activity to the finish, itself included; by activity. */
   readonly tailVariance: Float64Array;
-  /** Activities from the latest early finish to the earliest. */
+  /** Activities from the latest early finish to the earliest; of one finish, from the largest variance down. */
   readonly byFinish: Int32Array;
+  /** By position in `byFinish`: where the next earlier finish begins. */
+  readonly nextFinish: Int32Array;
   /** The project's finish. */
   readonly finish: number;
 }
@@ -37,6 +39,10 @@ export function prepareBase(network: Network): Base | null {
   const byRank = (values: Float64Array) => Float64Array.from(order, (activity) => values[activity]!);
   const late = byRank(lateStart);
   const tails = tailVariances(ordered, late, byRank(network.variance));
+  const { chainVariance } = working;
+  const byFinish = order
+    .slice()
+    .sort((a, b) => earlyFinish[b]! - earlyFinish[a]! || chainVariance[b]! - chainVariance[a]!);
   const tailVariance = new Float64Array(count);
   order.forEach((activity, r) => (tailVariance[activity] = tails[r]!));
   return {
@@ -53,9 +59,20 @@ export function prepareBase(network: Network): Base | null {
     }),
     lateStart,
     tailVariance,
-    byFinish: order.slice().sort((a, b) => earlyFinish[b]! - earlyFinish[a]!),
+    byFinish,
+    nextFinish: nextDifferent(byFinish, earlyFinish),
     finish: forward.finish,
   };
+}
+
+/** By position: the first position behind it whose activity has another value. */
+function nextDifferent(activities: Int32Array, value: Float64Array): Int32Array {
+  const next = new Int32Array(activities.length);
+  for (let at = activities.length - 1; at >= 0; at--) {
+    const isSame = at + 1 < next.length && value[activities[at + 1]!] === value[activities[at]!];
+    next[at] = isSame ? next[at + 1]! : at + 1;
+  }
+  return next;
 }
 
 /** By rank: the variance of the activity and the largest of what can follow it on a longest path to the finish. */

@@ -98,16 +98,22 @@ function figuresAt(base: Base, bitten: ReadonlySet<number>, gate: Gate, last: nu
 }
 
 /** The finish and the largest variance of a chain that sets it, as things stand. */
-export function figuresOf({ working, byFinish, moved }: Base): Figures {
+export function figuresOf({ working, byFinish, nextFinish, moved }: Base): Figures {
   const { earlyStart, duration, chainVariance } = working;
   const longest = new Longest();
   const offer = (activity: number) =>
     longest.offer(earlyStart[activity]! + duration[activity]!, chainVariance[activity]!);
   for (const activity of moved.activities) offer(activity);
-  for (const activity of byFinish) {
-    if (moved.has(activity)) continue;
+  for (let at = 0; at < byFinish.length;) {
+    const activity = byFinish[at]!;
+    if (moved.has(activity)) {
+      at += 1;
+      continue;
+    }
     if (earlyStart[activity]! + duration[activity]! < longest.length - TOLERANCE) break;
     offer(activity);
+    // Of those that finish at once and did not move, the first has the largest variance.
+    at = nextFinish[at]!;
   }
   return { finish: byFinish.length > 0 ? longest.length : 0, variance: longest.variance };
 }

@@ -65,6 +65,21 @@ describe('the finish effect of a fix', () => {
   });
 });
 
+it('finds the largest variance among many that finish at once, some of them moved', () => {
+  // All take 5 days; the spread, and with it the variance, goes up from each to the next.
+  const spread = Array.from({ length: 50 }, (_, k) => `A${k} ${4 - k / 20} 5 ${6 + k / 20}`);
+  const effects = effectsOf(list(...spread));
+  const varianceOf = (k: number) => ((2 + k / 10) / 6) ** 2;
+  const shorten = (activity: number): NetworkChange => {
+    return { kind: 'estimates', activity, optimistic: 1, likely: 1, pessimistic: 1 };
+  };
+  expect(effects.effect([shorten(3)])).toEqual({ expectedDuration: 0, variance: 0 });
+  expect(effects.effect([shorten(49), shorten(48)])).toEqual({
+    expectedDuration: 0,
+    variance: expect.closeTo(varianceOf(47) - varianceOf(49), 12),
+  });
+});
+
 describe('a wide schedule of equal ways', () => {
   const across = Array.from({ length: 100 }, (_, k) => k);
   const layer = (k: number) =>
