@@ -27,9 +27,10 @@ export const main = (): Promise<number> => exitCode(() => untilEnded(start, true
 async function start(ending: Ending, interrupted: Promise<never>): Promise<number> {
   const settings = readSettings();
   const { home, port, host } = settings;
-  await makeHome(home);
-  await requireRoom(home);
-  const lock = await takeLock(home, 'start');
+  const place = placeOf(settings);
+  await makeHome(place);
+  await requireRoom(place);
+  const lock = await takeLock(place, 'start');
   if (!lock.held) return alreadyRunning(lock.by);
   ending.add(() => lock.release());
   if (lock.leftOver) say('An earlier start ended without tidying up; its lock is taken over.');
@@ -45,7 +46,7 @@ async function start(ending: Ending, interrupted: Promise<never>): Promise<numbe
     serve(ending, {
       port,
       host,
-      logFile: join(home, 'server.log'),
+      logFile: join(place, 'server.log'),
       env: {
         DATABASE_URL: database.url,
         AUTH_SECRET: secret,
@@ -57,11 +58,16 @@ async function start(ending: Ending, interrupted: Promise<never>): Promise<numbe
   await lock.announce(address);
   await announce(settings, address);
   const gone = await Promise.race([
-    server.ended.then(() => `The application ended by itself; see ${join(home, 'server.log')}.`),
+    server.ended.then(() => `The application ended by itself; see ${join(place, 'server.log')}.`),
     database.ended.then(() => `The database ended by itself; see ${join(home, 'postgres.log')}.`),
     interrupted,
   ]);
   throw new Refusal(gone);
+}
+
+/** Where a start keeps its lock and its log: one start at a time uses the local cluster, one a port a database elsewhere. */
+function placeOf({ home, port, databaseUrl }: Settings): string {
+  return databaseUrl ? join(home, `port-${port}`) : home;
 }
 
 interface Opened {
