@@ -1,4 +1,5 @@
 import { execFile } from 'node:child_process';
+import { randomUUID } from 'node:crypto';
 import { link, readFile, rename, rm, writeFile } from 'node:fs/promises';
 import { join } from 'node:path';
 import { setTimeout as sleep } from 'node:timers/promises';
@@ -8,6 +9,8 @@ import { z } from 'zod';
 const run = promisify(execFile);
 
 const holder = z.object({
+  /** Of this taking; a process may take several locks, or one again. */
+  id: z.string(),
   pid: z.int().positive(),
   /** What tells this process from a later one with the same id. */
   mark: z.string(),
@@ -31,8 +34,14 @@ export type Lock =
 /** Takes the lock on a home: one process at a time starts its cluster. A lock whose process is gone is taken over. */
 export async function takeLock(home: string, what: string): Promise<Lock> {
   const file = join(home, 'lock.json');
-  const own: Holder = { pid: process.pid, mark: (await markOf(process.pid)) ?? '', what, address: null };
-  const draft = join(home, `lock.${process.pid}`);
+  const own: Holder = {
+    id: randomUUID(),
+    pid: process.pid,
+    mark: (await markOf(process.pid)) ?? '',
+    what,
+    address: null,
+  };
+  const draft = join(home, `lock.${own.id}`);
   await writeFile(draft, JSON.stringify(own), { mode: 0o600 });
   try {
     if (await linked(draft, file)) return handle(file, own, false);
@@ -42,7 +51,7 @@ export async function takeLock(home: string, what: string): Promise<Lock> {
     // Had another found the same left-over lock, the later of the two has it now.
     await sleep(100);
     const now = await readHolder(file);
-    if (now && now.pid !== own.pid) return { held: false, by: now };
+    if (now && now.id !== own.id) return { held: false, by: now };
     return handle(file, own, true);
   } finally {
     await rm(draft, { force: true });
@@ -53,10 +62,14 @@ function handle(file: string, own: Holder, leftOver: boolean): Lock {
   return {
     held: true,
     leftOver,
-    announce: (address) => writeFile(file, JSON.stringify({ ...own, address })),
+    announce: async (address) => {
+      // In one step: half a lock would read as a damaged one.
+      await writeFile(`${file}.new`, JSON.stringify({ ...own, address }), { mode: 0o600 });
+      await rename(`${file}.new`, file);
+    },
     release: async () => {
       const now = await readHolder(file);
-      if (now?.pid === own.pid) await rm(file, { force: true });
+      if (now?.id === own.id) await rm(file, { force: true });
     },
   };
 }

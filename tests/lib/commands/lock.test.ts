@@ -29,10 +29,13 @@ describe('takeLock', () => {
   });
 
   it.each([
-    ['a process that is gone', JSON.stringify({ pid: 4_000_000, mark: 'x', what: 'start', address: null })],
+    [
+      'a process that is gone',
+      JSON.stringify({ id: 'x', pid: 4_000_000, mark: 'x', what: 'start', address: null }),
+    ],
     [
       'another process with the same id',
-      JSON.stringify({ pid: process.pid, mark: 'x', what: 'start', address: null }),
+      JSON.stringify({ id: 'x', pid: process.pid, mark: 'x', what: 'start', address: null }),
     ],
     ['nobody: it is damaged', '{"pid": 12'],
     ['nobody: it is empty', ''],
@@ -44,10 +47,16 @@ describe('takeLock', () => {
     expect(holder && (await isAlive(holder))).toBe(true);
   });
 
+  it('is taken over by one of many who find it left over', async () => {
+    await writeFile(file, '');
+    const locks = await Promise.all(Array.from({ length: 8 }, () => takeLock(home, 'start')));
+    expect(locks.filter((lock) => lock.held)).toHaveLength(1);
+  });
+
   it('does not give back what another has taken over', async () => {
     const lock = await takeLock(home, 'start');
     if (!lock.held) throw new Error('Refused.');
-    const other = JSON.stringify({ pid: 1, mark: 'x', what: 'start', address: null });
+    const other = JSON.stringify({ id: 'x', pid: 1, mark: 'x', what: 'start', address: null });
     await writeFile(file, other);
     await lock.release();
     expect(await readFile(file, 'utf8')).toBe(other);
