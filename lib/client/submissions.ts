@@ -72,11 +72,15 @@ export function useChance(
 }
 
 /** Marks what the cells give as stale; only what is on the screen is fetched again. */
-export function invalidateDerived(client: QueryClient, office: string, submission: string): Promise<void[]> {
-  const parts = [...DERIVED, 'record', 'corrections'];
-  return Promise.all(
-    parts.map((part) =>
-      client.invalidateQueries({ queryKey: keys.submissionPart(office, submission, part) }),
-    ),
-  );
+export async function invalidateDerived(
+  client: QueryClient,
+  office: string,
+  submission: string,
+): Promise<void> {
+  const parts = [...DERIVED, 'record', 'corrections'].map((part) => ({
+    queryKey: keys.submissionPart(office, submission, part),
+  }));
+  // A first answer still on its way was asked for before the step: invalidating would wait for it and keep it.
+  await Promise.all(parts.map((part) => client.cancelQueries(part)));
+  await Promise.all(parts.map((part) => client.invalidateQueries(part)));
 }
