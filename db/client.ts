@@ -3,6 +3,9 @@ import { Pool } from 'pg';
 import * as schema from './schema';
 
 export type Database = NodePgDatabase<typeof schema>;
+/** For a connection, in milliseconds: a database that cannot be reached is said to be so. */
+const LONGEST_WAIT = 20_000;
+
 /** What a query function is given: one open transaction. */
 export type Tx = Parameters<Parameters<Database['transaction']>[0]>[0];
 
@@ -24,7 +27,12 @@ export function databaseUrl(): string {
 function connection(): Connection {
   const url = databaseUrl();
   if (holder.plumbrowConnection?.url === url) return holder.plumbrowConnection;
-  const pool = new Pool({ connectionString: url, max: 10, application_name: 'plumbrow' });
+  const pool = new Pool({
+    connectionString: url,
+    max: 10,
+    connectionTimeoutMillis: LONGEST_WAIT,
+    application_name: 'plumbrow',
+  });
   // A connection that fails while idle is replaced by the pool; without a listener it would end the process.
   pool.on('error', (error) => console.warn(`A database connection was lost: ${error.message}`));
   holder.plumbrowConnection = { url, pool, database: drizzle(pool, { schema }) };

@@ -1,5 +1,6 @@
 import { Refusal } from '@/lib/contract/errors';
 import { log } from './log';
+import { isDatabaseAway } from './unavailable';
 
 /** The one place where errors become answers (RFC 9457). What nobody foresaw is logged, and only its id is told. */
 export function problemResponse(error: unknown, request: Request): Response {
@@ -16,6 +17,11 @@ export function problemResponse(error: unknown, request: Request): Response {
     { id, err: error, method: request.method, url: withoutSecret(new URL(request.url).pathname) },
     'unexpected error',
   );
+  if (isDatabaseAway(error)) {
+    const detail =
+      'The database does not answer. Try again in a moment, and look first whether what you did was kept.';
+    return problem(503, { title: 'Not available', detail }, { 'retry-after': '5' });
+  }
   return problem(500, {
     title: 'Something went wrong here',
     detail: `Nothing was changed. Quote ${id} when you report it.`,
