@@ -1,4 +1,4 @@
-import { type SQL, sql } from 'drizzle-orm';
+import { sql } from 'drizzle-orm';
 import { type AnyPgColumn, check, customType, timestamp, uuid } from 'drizzle-orm/pg-core';
 
 /** Columns and checks that several tables share. */
@@ -15,5 +15,3 @@ export function oneOf(name: string, column: AnyPgColumn, words: readonly string[
   const list = words.map((word) => `'${word.replaceAll("'", "''")}'`).join(', ');
   return check(name, sql`${column} in (${sql.raw(list)})`);
 }
-
-export const holds = (name: string, condition: SQL) => check(name, condition);

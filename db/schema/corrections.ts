@@ -1,7 +1,7 @@
 import { sql } from 'drizzle-orm';
-import { foreignKey, index, integer, jsonb, pgTable, unique, uuid } from 'drizzle-orm/pg-core';
+import { check, foreignKey, index, integer, jsonb, pgTable, unique, uuid } from 'drizzle-orm/pg-core';
 import type { CellEdit } from '../../lib/schedule/edit';
-import { holds, id, moment } from './columns';
+import { id, moment } from './columns';
 import { findings } from './findings';
 import { fixes } from './fixes';
 import { contractorPolicy, ofVisibleSubmission, staffPolicy } from './policy';
@@ -40,7 +40,7 @@ export const corrections = pgTable(
     index('corrections_finding').on(table.findingId),
     index('corrections_created_by').on(table.createdBy),
     index('corrections_withdrawn_by').on(table.withdrawnBy),
-    holds('corrections_withdrawn', sql`(${table.withdrawnBy} is null) = (${table.withdrawnAt} is null)`),
+    check('corrections_withdrawn', sql`(${table.withdrawnBy} is null) = (${table.withdrawnAt} is null)`),
     staffPolicy('corrections', table.officeId),
     contractorPolicy('corrections', table.officeId, ofVisibleSubmission(table.submissionId), 'all'),
   ],

@@ -1,5 +1,6 @@
 import { sql } from 'drizzle-orm';
 import {
+  check,
   doublePrecision,
   foreignKey,
   index,
@@ -12,7 +13,7 @@ import {
 } from 'drizzle-orm/pg-core';
 import type { CellEdit } from '../../lib/schedule/edit';
 import { FIX_STATES } from '../../lib/schedule/weight';
-import { holds, id, oneOf } from './columns';
+import { id, oneOf } from './columns';
 import { findings } from './findings';
 import { contractorPolicy, ofVisibleSubmission, staffPolicy } from './policy';
 import { submissions } from './submissions';
@@ -44,7 +45,7 @@ export const fixes = pgTable(
       foreignColumns: [submissions.officeId, submissions.id],
     }).onDelete('cascade'),
     oneOf('fixes_state', table.state, FIX_STATES),
-    holds('fixes_rank', sql`${table.rank} >= 0`),
+    check('fixes_rank', sql`${table.rank} >= 0`),
     staffPolicy('fixes', table.officeId),
     contractorPolicy('fixes', table.officeId, ofVisibleSubmission(table.submissionId), 'all'),
   ],

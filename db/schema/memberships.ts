@@ -1,7 +1,7 @@
 import { sql } from 'drizzle-orm';
-import { foreignKey, index, pgTable, text, unique, uuid } from 'drizzle-orm/pg-core';
+import { check, foreignKey, index, pgTable, text, unique, uuid } from 'drizzle-orm/pg-core';
 import { ROLES } from '../../lib/contract/shared';
-import { holds, id, moment, oneOf } from './columns';
+import { id, moment, oneOf } from './columns';
 import { contractors } from './contractors';
 import { offices } from './offices';
 import { contractorPolicy, identityPolicy, isContractor, staffPolicy } from './policy';
@@ -33,7 +33,7 @@ export const memberships = pgTable(
     index('memberships_user').on(table.userId),
     index('memberships_office_contractor').on(table.officeId, table.contractorId),
     oneOf('memberships_role', table.role, ROLES),
-    holds(
+    check(
       'memberships_scheduler_has_contractor',
       sql`(${table.role} = 'scheduler') = (${table.contractorId} is not null)`,
     ),

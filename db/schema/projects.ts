@@ -1,5 +1,6 @@
 import { sql } from 'drizzle-orm';
 import {
+  check,
   date,
   doublePrecision,
   foreignKey,
@@ -11,7 +12,7 @@ import {
   uuid,
 } from 'drizzle-orm/pg-core';
 import { UNITS } from '../../lib/schedule/activity';
-import { holds, id, moment, oneOf } from './columns';
+import { id, moment, oneOf } from './columns';
 import { contractors } from './contractors';
 import { offices } from './offices';
 import { contractorPolicy, isContractor, staffPolicy } from './policy';
@@ -55,8 +56,8 @@ export const projects = pgTable(
     }),
     index('projects_created_by').on(table.createdBy),
     oneOf('projects_unit', table.unit, UNITS),
-    holds('projects_hours_per_day', sql`${table.hoursPerDay} > 0 and ${table.hoursPerDay} <= 24`),
-    holds(
+    check('projects_hours_per_day', sql`${table.hoursPerDay} > 0 and ${table.hoursPerDay} <= 24`),
+    check(
       'projects_working_days',
       sql`cardinality(${table.workingDays}) > 0 and ${table.workingDays} <@ array[1, 2, 3, 4, 5, 6, 7]`,
     ),

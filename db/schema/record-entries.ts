@@ -1,6 +1,6 @@
 import { sql } from 'drizzle-orm';
-import { foreignKey, index, integer, jsonb, pgTable, text, unique, uuid } from 'drizzle-orm/pg-core';
-import { holds, id, moment, oneOf } from './columns';
+import { check, foreignKey, index, integer, jsonb, pgTable, text, unique, uuid } from 'drizzle-orm/pg-core';
+import { id, moment, oneOf } from './columns';
 import { AUDIENCES } from './comments';
 import { offices } from './offices';
 import { contractorPolicy, ofVisibleSubmission, staffPolicy } from './policy';
@@ -51,7 +51,7 @@ export const recordEntries = pgTable(
     index('record_entries_submission_sequence').on(table.submissionId, table.sequence),
     index('record_entries_actor').on(table.actorId),
     oneOf('record_entries_audience', table.audience, AUDIENCES),
-    holds('record_entries_first', sql`(${table.sequence} = 1) = (${table.previousHash} = '')`),
+    check('record_entries_first', sql`(${table.sequence} = 1) = (${table.previousHash} = '')`),
     staffPolicy('record_entries', table.officeId),
     contractorPolicy(
       'record_entries',

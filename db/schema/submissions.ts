@@ -1,10 +1,10 @@
 import { sql } from 'drizzle-orm';
-import { foreignKey, index, integer, jsonb, pgTable, text, unique, uuid } from 'drizzle-orm/pg-core';
+import { check, foreignKey, index, integer, jsonb, pgTable, text, unique, uuid } from 'drizzle-orm/pg-core';
 import type { Figures } from '../../lib/contract/submission';
 import type { ReadingOptions, RefusedRow, RowCounts } from '../../lib/schedule/activity-list';
 import type { Matching } from '../../lib/schedule/field';
 import { SUBMISSION_STATES } from '../../lib/schedule/weight';
-import { bytea, holds, id, moment, oneOf } from './columns';
+import { bytea, id, moment, oneOf } from './columns';
 import { offices } from './offices';
 import { contractorPolicy, isContractor, ofVisibleSubmission, staffPolicy } from './policy';
 import { projects } from './projects';
@@ -59,8 +59,8 @@ export const submissions = pgTable(
     index('submissions_office_contractor_project').on(table.officeId, table.contractorId, table.projectId),
     index('submissions_received_by').on(table.receivedBy),
     oneOf('submissions_status', table.status, SUBMISSION_STATES),
-    holds('submissions_revision', sql`${table.revision} >= 0`),
-    holds('submissions_sha256', sql`${table.fileSha256} ~ '^[0-9a-f]{64}$'`),
+    check('submissions_revision', sql`${table.revision} >= 0`),
+    check('submissions_sha256', sql`${table.fileSha256} ~ '^[0-9a-f]{64}$'`),
     staffPolicy('submissions', table.officeId),
     contractorPolicy('submissions', table.officeId, isContractor(table.contractorId), 'all'),
   ],

@@ -1,6 +1,6 @@
 import { sql } from 'drizzle-orm';
-import { integer, pgPolicy, pgTable, text } from 'drizzle-orm/pg-core';
-import { holds, id, moment } from './columns';
+import { check, integer, pgPolicy, pgTable, text } from 'drizzle-orm/pg-core';
+import { id, moment } from './columns';
 import { appRole, identityPolicy } from './policy';
 
 /** A person, who may be a member of several offices. The application's role cannot read `password_hash`. */
@@ -17,7 +17,7 @@ export const users = pgTable(
     createdAt: moment('created_at').notNull().defaultNow(),
   },
   (table) => [
-    holds('users_email_lower', sql`${table.email} = lower(${table.email})`),
+    check('users_email_lower', sql`${table.email} = lower(${table.email})`),
     // The inner select runs under the policies of memberships: the same office, and who is to be seen there.
     pgPolicy('users_fellow', {
       to: appRole,

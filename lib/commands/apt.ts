@@ -24,9 +24,10 @@ async function install(name: string, log: Log): Promise<void> {
       env: { ...process.env, DEBIAN_FRONTEND: 'noninteractive' },
       maxBuffer: 64_000_000,
     });
+  log('apt-get update');
+  // A source that does not answer is no reason not to try what is known already.
+  await apt('update', '-q').catch(() => log('Not every package source answered.'));
   try {
-    log('apt-get update');
-    await apt('update', '-q');
     log(`apt-get install ${name}`);
     await apt('install', '-y', '-q', '--no-install-recommends', name);
   } catch (error) {
