@@ -46,6 +46,7 @@ function BlockingList({
   submission: string;
   findings: readonly FindingView[];
 }) {
+  const format = useFormat();
   const base = stopPath(office, submission, 'findings');
   const named = findings.length === NAMED + 1 ? findings.length : NAMED;
   const more = findings.length - named;
@@ -62,7 +63,7 @@ function BlockingList({
       {more > 0 && (
         <li>
           <Link href={`${base}?weight=blocks&state=open`}>
-            and {more} more findings that block the computation
+            and {format.count(more)} more findings that block the computation
           </Link>
         </li>
       )}
@@ -105,5 +106,5 @@ function proposedSentence(proposed: Figures, target: string | null, format: Form
       target !== null &&
       `the chance of ${format.date(target)} ${format.percent(proposed.chanceOfTarget)}`,
   ].filter((part) => part !== false);
-  return `If the fixes proposed for them were adopted, ${parts.join(', ')}.`;
+  return `If the fixes proposed here were adopted, ${parts.join(', ')}.`;
 }

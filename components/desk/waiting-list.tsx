@@ -3,6 +3,7 @@
 import Link from 'next/link';
 import { useOfficeView } from '@/components/shell/office-context';
 import { DateText } from '@/components/ui/date-text';
+import { useFormat } from '@/components/ui/locale';
 import { Panel } from '@/components/ui/panel';
 import { StateWord } from '@/components/ui/state-word';
 import { OpenCounts } from './open-counts';
@@ -37,6 +38,7 @@ export function WaitingList({ projects }: { projects: readonly ProjectView[] }) 
 
 function WaitingRow({ item }: { item: Waiting }) {
   const { slug } = useOfficeView();
+  const format = useFormat();
   const { project, latest } = item;
   const toProject = item.task === 'revise' || item.task === 'first';
   const href = toProject || !latest ? `/${slug}/projects/${project.id}` : `/${slug}/submissions/${latest.id}`;
@@ -57,7 +59,7 @@ function WaitingRow({ item }: { item: Waiting }) {
             </>
           )}
         </p>
-        <p>{sentenceFor(item)}</p>
+        <p>{sentenceFor(item, format.count)}</p>
       </div>
       {latest && <OpenCounts open={latest.open} />}
     </li>

@@ -47,16 +47,16 @@ function schedulerTask(latest: Latest | null): Waiting['task'] | null {
   return undecided && openCount(latest) > 0 ? 'answer' : null;
 }
 
-/** What there is to do, as a plain sentence. */
-export function sentenceFor({ task, latest }: Waiting): string {
+/** What there is to do, as a plain sentence; `count` writes a number as the office does. */
+export function sentenceFor({ task, latest }: Waiting, count: (value: number) => string = String): string {
   const open = latest ? openCount(latest) : 0;
   switch (task) {
     case 'review':
-      return open === 1 ? 'One finding is open.' : `${String(open)} findings are open.`;
+      return open === 1 ? 'One finding is open.' : `${count(open)} findings are open.`;
     case 'decide':
       return 'No finding is open; it can be decided.';
     case 'answer':
-      return open === 1 ? 'One finding waits for an answer.' : `${String(open)} findings wait for an answer.`;
+      return open === 1 ? 'One finding waits for an answer.' : `${count(open)} findings wait for an answer.`;
     case 'revise':
       return 'It was returned; the next revision is yours.';
     case 'first':

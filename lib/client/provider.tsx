@@ -12,8 +12,9 @@ export function QueryProvider({ children }: { children: ReactNode }) {
 function makeClient(): QueryClient {
   return new QueryClient({
     defaultOptions: {
-      queries: { staleTime: 15_000, retry: worthAnotherTry, throwOnError: false },
-      mutations: { retry: false },
+      // Without a connection a call fails at once and says so; it does not wait, unsaid, for the connection to come back.
+      queries: { staleTime: 15_000, retry: worthAnotherTry, throwOnError: false, networkMode: 'always' },
+      mutations: { retry: false, networkMode: 'always' },
     },
   });
 }

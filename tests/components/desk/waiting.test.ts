@@ -76,5 +76,7 @@ describe('sentenceFor', () => {
       '5 findings are open.',
     );
     expect(openCount(latest('received', 3, '', 2))).toBe(5);
+    const many = { project: one, latest: latest('received', 24_982), task: 'review' } as const;
+    expect(sentenceFor(many, (value) => value.toLocaleString('en-GB'))).toBe('24,982 findings are open.');
   });
 });
