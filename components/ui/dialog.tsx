@@ -2,7 +2,7 @@
 
 import { X } from 'lucide-react';
 import { Dialog as Radix } from 'radix-ui';
-import type { ReactNode } from 'react';
+import { useRef, type ReactNode } from 'react';
 import { classes } from './classes';
 
 interface DialogProps {
@@ -27,12 +27,19 @@ export function Dialog({
   wide = false,
   children,
 }: DialogProps) {
+  // A key may have opened it, so there is no button that Radix would know of.
+  const before = useRef<Element | null>(null);
   return (
     <Radix.Root open={open} onOpenChange={onOpenChange}>
       <Radix.Portal>
         <Radix.Overlay className="fixed inset-0 z-40 bg-[rgb(0_0_0/0.45)]" />
         <Radix.Content
           data-hotkeys="held"
+          onOpenAutoFocus={() => (before.current = document.activeElement)}
+          onCloseAutoFocus={(event) => {
+            event.preventDefault();
+            if (before.current instanceof HTMLElement) before.current.focus();
+          }}
           {...(description ? {} : { 'aria-describedby': undefined })}
           className={classes(
             'fixed top-1/2 left-1/2 z-50 flex max-h-[calc(100dvh-32px)] w-[calc(100vw-32px)] -translate-x-1/2 -translate-y-1/2 flex-col border border-t-2 border-hair border-t-ink bg-leaf shadow-lift',
