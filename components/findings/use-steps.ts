@@ -29,7 +29,15 @@ export function useSteps(office: string, submission: string) {
   const [said, setSaid] = useState('');
   /** Batches made on this page, the latest last. */
   const [made, setMade] = useState<readonly string[]>([]);
+  const madeNow = useRef(made);
   const underWay = useRef(new Set<string>());
+  /** The step begun last, until it is told what came of it: undoing waits for it. */
+  const latest = useRef<Promise<unknown>>(Promise.resolve());
+
+  const setBatches = (change: (all: readonly string[]) => readonly string[]): void => {
+    madeNow.current = change(madeNow.current);
+    setMade(madeNow.current);
+  };
 
   /** Runs a step unless the same is under way: a double click sends once. */
   const run = async (
@@ -56,17 +64,23 @@ export function useSteps(office: string, submission: string) {
       correct.mutateAsync({ kind: 'undo', correction: batch }),
     );
     if (!result) return false;
-    setMade((all) => all.filter((known) => known !== batch));
+    setBatches((all) => all.filter((known) => known !== batch));
     setSaid(outcomeSentence('Undone.', result, format));
     if (result.inapplicable.length > 0) toast({ text: inapplicableSentence(result), tone: 'trouble' });
     return true;
   };
 
-  const change = async (name: string, finding: string | null, step: CorrectionStep, done: string) => {
+  const change = (name: string, finding: string | null, step: CorrectionStep, done: string) => {
+    const changed = carryOut(name, finding, step, done);
+    latest.current = changed;
+    return changed;
+  };
+
+  const carryOut = async (name: string, finding: string | null, step: CorrectionStep, done: string) => {
     const result = await run(name, finding, () => correct.mutateAsync(step));
     if (!result) return false;
     const { batch, items, skipped } = result;
-    if (batch) setMade((all) => [...all, batch]);
+    if (batch) setBatches((all) => [...all, batch]);
     const sentence = outcomeSentence(done, result, format);
     setSaid(sentence);
     if (skipped.length > 0) toast({ text: skippedSentence(result), tone: 'trouble' });
@@ -117,12 +131,16 @@ export function useSteps(office: string, submission: string) {
         setTrouble({ finding: finding.id, error, first: null });
       }
     },
-    /** The last step made on this page; false where there is none. */
-    undoLast: async (): Promise<boolean> => {
-      const batch = made.at(-1);
-      if (batch === undefined) return false;
-      await undo(batch, null);
-      return true;
+    /** The last step made on this page, waited for where it is under way; false where there is none. */
+    undoLast: (): Promise<boolean> => {
+      const undone = latest.current.then(async () => {
+        const batch = madeNow.current.at(-1);
+        if (batch === undefined) return false;
+        await undo(batch, null);
+        return true;
+      });
+      latest.current = undone;
+      return undone;
     },
   };
 }

@@ -132,7 +132,8 @@ function settle(client: QueryClient, office: string, submission: string, result:
     findings ? withResult(findings, result) : findings,
   );
   client.setQueryData<SubmissionView>(keys.submission(office, submission), result.submission);
-  return invalidateDerived(client, office, submission);
+  // Not waited for: the step is made, and the next one may begin.
+  void invalidateDerived(client, office, submission);
 }
 
 /** A refused step leaves nothing behind; where someone else was first, what they did is fetched. */

@@ -17,7 +17,7 @@ test('reviewer and scheduler talk about a row, each seeing the other without a r
   await reviewer.page.getByLabel(/Write a comment/).fill(secret);
   await reviewer.page.getByRole('radio', { name: /Inside/ }).check();
   await reviewer.page.getByRole('button', { name: 'Add the comment' }).click();
-  await expect(reviewer.page.getByText(secret)).toBeVisible();
+  await expect(reviewer.page.getByRole('paragraph').filter({ hasText: secret })).toBeVisible();
 
   await reviewer.page.getByLabel(/Write a comment/).fill(question);
   await reviewer.page.getByRole('radio', { name: /Shared/ }).check();
@@ -29,7 +29,7 @@ test('reviewer and scheduler talk about a row, each seeing the other without a r
   await scheduler.page.getByRole('button', { name: 'Add the comment' }).click();
   await expect(reviewer.page.getByText(answer)).toBeVisible({ timeout: 5000 });
   await scheduler.page.reload();
-  await expect(scheduler.page.getByText(answer)).toBeVisible();
+  await expect(scheduler.page.getByRole('paragraph').filter({ hasText: answer })).toBeVisible();
   await expect(scheduler.page.getByText(secret)).toHaveCount(0);
   await reviewer.context.close();
   await scheduler.context.close();
