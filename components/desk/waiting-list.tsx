@@ -8,7 +8,7 @@ import { Panel } from '@/components/ui/panel';
 import { StateWord } from '@/components/ui/state-word';
 import { OpenCounts } from './open-counts';
 import type { ProjectView } from '@/lib/contract/project';
-import { sentenceFor, waitingFor, type Waiting } from './waiting';
+import { sentenceFor, sentenceForNothing, waitingFor, type Waiting } from './waiting';
 
 export function WaitingList({ projects }: { projects: readonly ProjectView[] }) {
   const { me } = useOfficeView();
@@ -16,7 +16,7 @@ export function WaitingList({ projects }: { projects: readonly ProjectView[] }) 
   if (waiting.length === 0) {
     return (
       <Panel title="Nothing waits for you" bench>
-        <p className="text-slate">Each revision that came in has been dealt with.</p>
+        <p className="text-slate">{sentenceForNothing(me.role)}</p>
       </Panel>
     );
   }

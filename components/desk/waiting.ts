@@ -47,6 +47,13 @@ function schedulerTask(latest: Latest | null): Waiting['task'] | null {
   return undecided && openCount(latest) > 0 ? 'answer' : null;
 }
 
+/** Why nothing waits for somebody of this role. */
+export function sentenceForNothing(role: Role): string {
+  if (role === 'scheduler') return 'None of your revisions came back, and none has an open finding.';
+  if (role === 'analyst') return 'Each revision that came in has been dealt with.';
+  return 'No revision that is still to be decided has an open finding.';
+}
+
 /** What there is to do, as a plain sentence; `count` writes a number as the office does. */
 export function sentenceFor({ task, latest }: Waiting, count: (value: number) => string = String): string {
   const open = latest ? openCount(latest) : 0;

@@ -1,5 +1,11 @@
 import { describe, expect, it } from 'vitest';
-import { openCount, sentenceFor, waitingFor, type Latest } from '@/components/desk/waiting';
+import {
+  openCount,
+  sentenceFor,
+  sentenceForNothing,
+  waitingFor,
+  type Latest,
+} from '@/components/desk/waiting';
 import type { ProjectView } from '@/lib/contract/project';
 
 const figures = {
@@ -65,6 +71,14 @@ describe('waitingFor', () => {
   it('puts what blocks first', () => {
     const blocked = project('blocked', latest('received', 0, '2027-04-01T00:00:00Z', 1));
     expect(codes('analyst', [...projects, blocked])[0]).toBe('blocked review');
+  });
+});
+
+describe('sentenceForNothing', () => {
+  it('says no more than is so for the role', () => {
+    expect(sentenceForNothing('analyst')).toBe('Each revision that came in has been dealt with.');
+    expect(sentenceForNothing('reviewer')).toContain('still to be decided');
+    expect(sentenceForNothing('scheduler')).toContain('None of your revisions came back');
   });
 });
 
